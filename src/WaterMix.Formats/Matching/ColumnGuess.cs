@@ -47,7 +47,7 @@ public static class ColumnGuess
 
             SourceColumn? flag = companions.FirstOrDefault(c => Stem(c, FlagEndings) is { } stem && IsNameOf(stem, column, match, main));
             SourceColumn? source = companions.FirstOrDefault(c => IsSource(header, c) && c.BaseName == match.Quantity + "_source" && column.BaseName == match.Quantity);
-            SourceColumn? scale = match.Quantity == Quantity.InSituTemperature.Id && match.Unit is null
+            SourceColumn? scale = match.Quantity == Quantity.InSituTemperature.Id
                 ? companions.FirstOrDefault(c => KnownNames.TemperatureScales.Contains(KnownNames.Key(c.BaseName)))
                 : null;
             main[i] = (column, match with { Flag = flag?.Name, Source = source?.Name, UnitColumn = scale?.Name });

@@ -90,7 +90,8 @@ internal static class KnownNames
             if (Quantities.TryGetValue(string.Join('_', words.Take(count)), out Quantity? quantity))
             {
                 string unit = string.Join('_', words.Skip(count));
-                if (unit.Length == 0 || Units.Find(quantity, unit) is not null)
+                bool isPlaceOfBottle = origin == ValueOrigin.Bottle && quantity.Use == TracerUse.Never;
+                if (!isPlaceOfBottle && (unit.Length == 0 || Units.Find(quantity, unit) is not null))
                 {
                     return (quantity, origin, unit);
                 }

@@ -9,6 +9,7 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
 {
     private readonly Dictionary<(string Quantity, ValueOrigin Role), ColumnTarget> _targets = targets.ToDictionary(t => (t.Plan.Quantity.Id, t.Plan.Role));
     private long _leaking;
+    private long _mistripped;
 
     /// <summary>The table of one block; the buffers' arrays become the table's.</summary>
     /// <param name="rows">Number of rows in the buffers.</param>
@@ -18,6 +19,7 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
     {
         byte[]? bottles = schema.HasBottleFlags ? Fit(bottleFlags, rows) : null;
         _leaking += bottles?.LongCount(f => f == QualityFlags.Questionable) ?? 0;
+        _mistripped += bottles?.LongCount(f => f == QualityFlags.Bad) ?? 0;
         var columns = new List<SampleColumn>();
         var densities = new Densities(this, rows, columns);
         foreach (SchemaQuantity quantity in schema.Quantities)
@@ -52,12 +54,12 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
     {
         if (_leaking > 0)
         {
-            findings.Add(new Finding(Severity.Warning, "bottles that closed well", "leaking bottles (flag 3)", "Their values were kept; look at them.") { File = file, Column = bottleFlag?.Name, Count = _leaking });
+            findings.Fold("leaking", bottleFlag?.Name, () => new Finding(Severity.Warning, "bottles that closed well", "leaking bottles (flag 3)", "Their values were kept; look at them.") { File = file, Column = bottleFlag?.Name }, _leaking);
         }
 
-        foreach (ColumnTarget target in targets.Where(t => t.Voided > 0))
+        if (_mistripped > 0)
         {
-            findings.Add(new Finding(Severity.Warning, "bottles that tripped where they should", "values of bottles that did not (bottle flag 4)", "The values were made void.") { File = file, Column = target.Plan.Column.Name, Count = target.Voided });
+            findings.Fold("mistripped", bottleFlag?.Name, () => new Finding(Severity.Warning, "bottles that tripped where they should", "bottles that did not (flag 4)", "The values of their water were made void; the report counts them by column.") { File = file, Column = bottleFlag?.Name }, _mistripped);
         }
     }
 

@@ -37,7 +37,7 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
 
         if (columns.All(c => c.By == MatchedBy.OwnName) && identity.Count == 0)
         {
-            findings.Add(new Finding(Severity.Error, "column names of samples, such as station, latitude, pressure, oxygen", $"a first line with none of them ('{header.Columns.FirstOrDefault()?.Name}', ...)", "Begin the table with a header line, or name its columns in a match file (--columns).")
+            findings.Add(new Finding(Severity.Error, "column names of samples, such as station, latitude, pressure, oxygen", $"a first line with none of them ('{string.Join("', '", header.Columns.Take(3).Select(c => c.Name))}', ...)", "Begin the table with a header line, or name its columns in a match file (--columns).")
             { File = header.File.Name, Line = header.LastLine });
         }
 
@@ -84,13 +84,25 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
         ? match with { Identity = null }
         : match with { Quantity = _byName[match.Column].Name, Origin = null, Source = null, UnitColumn = null, By = MatchedBy.OwnName };
 
-    // Two columns that could be one quantity: an error where the caller needs it, otherwise both keep their own names.
+    // Two columns that could be one quantity, neither of them by its very id: an error where the caller needs it, otherwise both keep their own names.
     private List<ColumnMatch> SettleAmbiguity(List<ColumnMatch> matches)
     {
         var settled = new List<ColumnMatch>(matches);
         foreach (IGrouping<(string?, ValueOrigin), ColumnMatch> same in matches.Where(m => m.Quantity is not null && m.By != MatchedBy.OwnName).GroupBy(m => (m.Quantity, Role(m))).Where(g => g.Count() > 1))
         {
             ColumnMatch[] rivals = [.. same];
+            if (rivals.Count(m => m.By == MatchedBy.Id) == 1 && rivals.All(m => m.By != MatchedBy.MatchFile))
+            {
+                // The id itself is no guess: the others give way.
+                foreach (ColumnMatch other in rivals.Where(m => m.By != MatchedBy.Id))
+                {
+                    Report(Severity.Warning, _byName[other.Column], $"one column for {other.Quantity}", $"'{other.Column}' beside it", "It was kept as a further tracer. A match file (--columns) can say which it is.");
+                    settled[settled.IndexOf(other)] = OwnName(other);
+                }
+
+                continue;
+            }
+
             string names = string.Join(" and ", rivals.Select(m => $"'{m.Column}'"));
             bool needed = IsNeeded(rivals[0].Quantity!) || rivals.Any(m => m.By == MatchedBy.MatchFile);
             Report(

@@ -45,6 +45,9 @@ internal sealed class FileReader
     /// <summary>Rows read so far.</summary>
     public long Rows { get; private set; }
 
+    /// <summary>Values that bottles which did not trip made void, by the id of the main column.</summary>
+    public IEnumerable<(string Quantity, long Count)> Voided => _targets.Where(t => t.Voided > 0).Select(t => (t.Plan.Quantity.Id, t.Voided));
+
     /// <summary>The blocks of the file, in order.</summary>
     /// <param name="rowsBefore">Number of rows of the files before this one.</param>
     /// <param name="cancellation">Asked between blocks and every 1,024 rows.</param>

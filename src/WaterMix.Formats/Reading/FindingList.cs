@@ -21,16 +21,17 @@ internal sealed class FindingList
     /// <param name="kind">What is the same about them.</param>
     /// <param name="column">The column they share, or null.</param>
     /// <param name="first">Makes the finding where it is the first.</param>
-    public void Fold(string kind, string? column, Func<Finding> first)
+    /// <param name="count">How many are counted at once.</param>
+    public void Fold(string kind, string? column, Func<Finding> first, long count = 1)
     {
         if (_folded.TryGetValue((kind, column), out int index))
         {
-            _findings[index] = _findings[index] with { Count = _findings[index].Count + 1 };
+            _findings[index] = _findings[index] with { Count = _findings[index].Count + count };
             return;
         }
 
         _folded.Add((kind, column), _findings.Count);
-        _findings.Add(first());
+        _findings.Add(first() with { Count = count });
     }
 
     /// <summary>How often this kind was found in this column.</summary>

@@ -57,6 +57,11 @@ public sealed record ImportReport(
                 text.Append(CultureInfo.InvariantCulture, $"; {column.FromBottle} from the bottle, {column.FromCtd} from the CTD");
             }
 
+            if (column.Voided > 0)
+            {
+                text.Append(CultureInfo.InvariantCulture, $"; {column.Voided} made void by the bottle");
+            }
+
             text.Append(column.Flags.Count > 0 ? $"; flags {Counts(column.Flags)}" : "").Append(column.Conversion.Length > 0 ? $"; {column.Conversion}" : "").Append('\n');
         }
 

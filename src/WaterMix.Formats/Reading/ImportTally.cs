@@ -10,6 +10,7 @@ internal sealed class ImportTally(SampleTable columns, AcceptedFlags accepted)
     private readonly ColumnCount[] _counts = [.. columns.Columns.Select(_ => new ColumnCount())];
     private readonly long[] _bottleFlags = new long[10];
     private readonly Dictionary<string, long> _rows = new(StringComparer.Ordinal);
+    private readonly Dictionary<string, long> _voided = new(StringComparer.Ordinal);
     private long _total;
 
     /// <summary>Counts a block.</summary>
@@ -28,6 +29,15 @@ internal sealed class ImportTally(SampleTable columns, AcceptedFlags accepted)
         }
     }
 
+    /// <summary>Counts the values that were made void, by quantity id.</summary>
+    public void CountVoided(IEnumerable<(string Quantity, long Count)> voided)
+    {
+        foreach ((string quantity, long count) in voided)
+        {
+            _voided[quantity] = _voided.GetValueOrDefault(quantity) + count;
+        }
+    }
+
     /// <summary>The counts so far as a report.</summary>
     public ImportReport Report(IReadOnlyList<FilePlan> plans, TableSchema schema, IReadOnlyList<Finding> findings)
     {
@@ -36,7 +46,7 @@ internal sealed class ImportTally(SampleTable columns, AcceptedFlags accepted)
             _total,
             [.. plans.Select(p => new ImportedFile(p.Header.File.Name, Text(p.Header.Format), _rows.GetValueOrDefault(p.Header.File.Name)))],
             schema.Identity,
-            [.. columns.Columns.Select((c, i) => _counts[i].Report(c, Text(byId[c.Quantity.Id].By)))],
+            [.. columns.Columns.Select((c, i) => _counts[i].Report(c, Text(byId[c.Quantity.Id].By), _voided.GetValueOrDefault(c.Id)))],
             Counts(_bottleFlags),
             findings);
     }
@@ -88,7 +98,7 @@ internal sealed class ImportTally(SampleTable columns, AcceptedFlags accepted)
             }
         }
 
-        public ImportedColumn Report(SampleColumn column, string by) =>
-            new(column.Id, column.Quantity.Unit, column.Source, by, column.Conversion, _values, _missing, _usable, _values - _fromCtd, _fromCtd, Counts(_flags));
+        public ImportedColumn Report(SampleColumn column, string by, long voided) =>
+            new(column.Id, column.Quantity.Unit, column.Source, by, column.Conversion, _values, _missing, _usable, _values - _fromCtd, _fromCtd, voided, Counts(_flags));
     }
 }

@@ -11,6 +11,7 @@ namespace WaterMix.Formats.Reading;
 /// <param name="Usable">Samples with a value whose flag is accepted.</param>
 /// <param name="FromBottle">Values from the bottle.</param>
 /// <param name="FromCtd">Values from the CTD.</param>
+/// <param name="Voided">Values made void because their bottle did not trip correctly; they count as missing.</param>
 /// <param name="Flags">Number of samples by WHP flag, of those that have a flag.</param>
 public sealed record ImportedColumn(
     string Id,
@@ -23,4 +24,5 @@ public sealed record ImportedColumn(
     long Usable,
     long FromBottle,
     long FromCtd,
+    long Voided,
     IReadOnlyDictionary<int, long> Flags);

@@ -68,6 +68,7 @@ public sealed class OpenedSamples : IDisposable
             }
 
             rows += file.Rows;
+            _tally.CountVoided(file.Voided);
         }
     }
 
