@@ -77,6 +77,10 @@ public sealed class StrictJsonNode
     /// <summary>A text; it may be empty.</summary>
     public string? AsText() => Is(JsonValueKind.String, "text in double quotes") ? _text : null;
 
+    /// <summary>True where the value is this very text.</summary>
+    /// <param name="text">The text.</param>
+    public bool IsText(string text) => Kind == JsonValueKind.String && _text == text;
+
     /// <summary>A finite number.</summary>
     public double? AsNumber()
     {

@@ -151,7 +151,7 @@ public class EndMemberSetFileTests
 
         Assert.Null(reading.Value);
         Assert.Equal(
-            ["/version", null, "/endMembers/0/sd/silicate", "/endMembers/0/provenance/notes", "/endMembers/2/id"],
+            ["/version", "/endMembers/0/values/oxygen", "/endMembers/0/sd/silicate", "/endMembers/0/provenance/notes", "/endMembers/2/id"],
             reading.Findings.Select(f => f.Path));
         Assert.Equal([3L, 6L, 7L, 10L, 14L], reading.Findings.Select(f => f.Line!.Value));
     }
