@@ -34,9 +34,9 @@ public static class SampleReader
         var plans = new List<FilePlan>(files.Count);
         foreach (InputFile file in files)
         {
-            if (HeaderReader.Read(file, options.Match, findings) is { } header)
+            if (HeaderReader.Read(file, options.Match, findings) is { } header && new FilePlanner(header, options, findings).Plan() is { } plan)
             {
-                plans.Add(new FilePlanner(header, options, findings).Plan());
+                plans.Add(plan);
             }
         }
 
