@@ -22,39 +22,3 @@ public sealed record EndMember(string Id, string Name, IReadOnlyDictionary<strin
     /// <summary>The typical position, or null.</summary>
     public EndMemberPosition? Position { get; init; }
 }
-
-/// <summary>Where a source water is found; needed only to convert between the temperature and salinity pairs.</summary>
-/// <param name="Latitude">Degrees north, -90 to 90.</param>
-/// <param name="Longitude">Degrees east, -180 to 360.</param>
-/// <param name="Pressure">Sea pressure, dbar, 0 to 12 000.</param>
-public sealed record EndMemberPosition(double Latitude, double Longitude, double Pressure);
-
-/// <summary>How an end-member's numbers came about.</summary>
-public enum ProvenanceKind
-{
-    /// <summary>Typed in.</summary>
-    Manual,
-
-    /// <summary>Computed from samples.</summary>
-    Samples,
-
-    /// <summary>From a publication.</summary>
-    Literature,
-
-    /// <summary>From memory, not checked against a source.</summary>
-    Remembered,
-
-    /// <summary>Proposed by a method, not yet judged by a person.</summary>
-    Proposal,
-}
-
-/// <summary>Where an end-member's numbers come from.</summary>
-/// <param name="Kind">How they came about.</param>
-/// <param name="Note">Free text; null where the file has none.</param>
-/// <param name="Citation">The source; null where the file has none.</param>
-public sealed record Provenance(ProvenanceKind Kind, string? Note = null, string? Citation = null);
-
-/// <summary>A symmetric matrix over named tracers: a covariance or a correlation.</summary>
-/// <param name="Tracers">Quantity ids, one per row and column.</param>
-/// <param name="Matrix">Rows of the matrix, each as long as <paramref name="Tracers"/>.</param>
-public sealed record TracerMatrix(IReadOnlyList<string> Tracers, IReadOnlyList<IReadOnlyList<double>> Matrix);

@@ -1,0 +1,26 @@
+namespace WaterMix.Core.Mixing;
+
+/// <summary>A half-open range of a quantity: atLeast &lt;= value &lt; lessThan. Either bound may be absent; a missing value never holds.</summary>
+/// <param name="Quantity">The quantity id.</param>
+/// <param name="AtLeast">Lower bound, included, or null.</param>
+/// <param name="LessThan">Upper bound, excluded, or null.</param>
+public sealed record Condition(string Quantity, double? AtLeast, double? LessThan)
+{
+    /// <summary>Which equation of state a sigma condition tests.</summary>
+    public DensityScale Scale { get; init; } = DensityScale.Teos10;
+
+    /// <summary>True where the value is in the range; a longitude range whose start exceeds its end wraps round.</summary>
+    /// <param name="value">The sample's value in the quantity's unit; NaN is missing.</param>
+    public bool Holds(double value)
+    {
+        if (double.IsNaN(value))
+        {
+            return false;
+        }
+
+        bool above = AtLeast is not { } low || value >= low;
+        bool below = LessThan is not { } high || value < high;
+        bool wraps = Quantity == "longitude" && AtLeast > LessThan;
+        return wraps ? above || below : above && below;
+    }
+}

@@ -1,0 +1,18 @@
+namespace WaterMix.Core.Mixing;
+
+/// <summary>The published row-weighting recipes: standardise over the end-members, weigh, minimise the sum of squared rows.</summary>
+/// <param name="Weights">Weight by tracer id, each > 0.</param>
+public sealed record WeightedRows(IReadOnlyDictionary<string, double> Weights) : Fit
+{
+    /// <summary>What is done to a tracer row before it is weighed.</summary>
+    public Standardisation Standardise { get; init; } = Standardisation.MeanAndSd;
+
+    /// <summary>True: mean and sd are taken over the layer's permitted end-members; false: over the whole set.</summary>
+    public StandardiseOver Over { get; init; } = StandardiseOver.Layer;
+
+    /// <summary>The divisor of the variance.</summary>
+    public SdDivisor SdOver { get; init; } = SdDivisor.N;
+
+    /// <summary>Whether a weight multiplies the row or its square.</summary>
+    public WeightMeaning WeightsAre { get; init; } = WeightMeaning.RowFactors;
+}
