@@ -13,7 +13,8 @@ public sealed class OptimalityProof
     /// <param name="x">Length unknowns: the answer.</param>
     /// <returns>
     /// The largest of: a bound passed, |sum(x) - 1| with exact mass, and for each independent unknown the part of its gradient that should be zero
-    /// (or not positive at a bound), divided by |a_j - a_r| |b - a_r|, where r is the largest fraction (nothing is subtracted without exact mass). 0 is a perfect proof.
+    /// (or not positive at a bound), divided by |a_j - a_r| times the longest of b - a_r and all max(1, |x_k|) (a_k - a_r): the terms that the residual is summed from.
+    /// r is the largest fraction (nothing is subtracted without exact mass). 0 is a perfect proof.
     /// </returns>
     public double Violation(MixingSystem system, ReadOnlySpan<double> b, ReadOnlySpan<double> x)
     {
@@ -44,14 +45,19 @@ public sealed class OptimalityProof
         double scale = Vectors.Norm(Relative(system, b, reference));
         for (int j = 0; j < x.Length; j++)
         {
+            scale = Math.Max(scale, Math.Max(1, Math.Abs(x[j])) * Vectors.Norm(ColumnOf(system, j, reference)));
+        }
+
+        for (int j = 0; j < x.Length; j++)
+        {
             if (!system.IsIndependent[j] || (system.ExactMass && j == reference))
             {
                 continue;
             }
 
-            ReadOnlySpan<double> column = j < system.Fractions ? Relative(system, system.Column(j), reference) : system.Column(j);
+            ReadOnlySpan<double> column = ColumnOf(system, j, reference);
             double gradient = Vectors.Dot(column, residual);
-            double unit = Vectors.Norm(column) * Math.Max(scale, Vectors.Norm(residual));
+            double unit = Vectors.Norm(column) * scale;
             bool atBound = !system.IsFree[j] && x[j] == 0;
             double violation = atBound ? Math.Max(0, gradient) : Math.Abs(gradient);
             worst = Math.Max(worst, unit > 0 ? violation / unit : 0);
@@ -59,6 +65,9 @@ public sealed class OptimalityProof
 
         return worst;
     }
+
+    private ReadOnlySpan<double> ColumnOf(MixingSystem system, int column, int reference) =>
+        column < system.Fractions ? Relative(system, system.Column(column), reference) : system.Column(column);
 
     private ReadOnlySpan<double> Relative(MixingSystem system, ReadOnlySpan<double> values, int reference)
     {
