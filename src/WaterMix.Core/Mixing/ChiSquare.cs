@@ -30,6 +30,11 @@ public static class ChiSquare
             return 1;
         }
 
+        if (double.IsPositiveInfinity(x))
+        {
+            return 0;
+        }
+
         return x < a + 1 ? 1 - LowerBySeries(a, x) : UpperByFraction(a, x);
     }
 
