@@ -21,4 +21,21 @@ public sealed record EndMember(string Id, string Name, IReadOnlyDictionary<strin
 
     /// <summary>The typical position, or null.</summary>
     public EndMemberPosition? Position { get; init; }
+
+    /// <summary>True where the other holds the same content; dictionaries in any order.</summary>
+    /// <param name="other">Another one, or null.</param>
+    public bool Equals(EndMember? other) =>
+        other is not null
+        && Id == other.Id
+        && Name == other.Name
+        && Structural.Same(Values, other.Values)
+        && Structural.Same(Sd, other.Sd)
+        && Structural.Same(MeanSd, other.MeanSd)
+        && Correlations == other.Correlations
+        && Observations == other.Observations
+        && Position == other.Position
+        && Provenance == other.Provenance;
+
+    /// <inheritdoc/>
+    public override int GetHashCode() => HashCode.Combine(Id, Structural.Hash(Values), Structural.Hash(Sd));
 }

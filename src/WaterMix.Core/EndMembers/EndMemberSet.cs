@@ -14,4 +14,18 @@ public sealed record EndMemberSet(string Name, int Version, IReadOnlyList<EndMem
 
     /// <summary>The unit of each user-defined tracer, by its id.</summary>
     public IReadOnlyDictionary<string, string> Units { get; init; } = new Dictionary<string, string>();
+
+    /// <summary>True where the other holds the same content; dictionaries in any order.</summary>
+    /// <param name="other">Another one, or null.</param>
+    public bool Equals(EndMemberSet? other) =>
+        other is not null
+        && Name == other.Name
+        && Version == other.Version
+        && Description == other.Description
+        && Structural.Same(Citations, other.Citations)
+        && Structural.Same(Units, other.Units)
+        && Structural.Same(EndMembers, other.EndMembers);
+
+    /// <inheritdoc/>
+    public override int GetHashCode() => HashCode.Combine(Name, Version, Structural.Hash(EndMembers));
 }

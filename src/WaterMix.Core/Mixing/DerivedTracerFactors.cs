@@ -20,4 +20,29 @@ public sealed record DerivedTracerFactors
 
     /// <summary>The offset of PO4*, umol/kg. Default -1.95, <c>Broecker1998</c>.</summary>
     public double Po4StarOffset { get; init; } = -1.95;
+
+    /// <summary>
+    /// A tracer as a linear form of measured quantities: <c>oxygen + 170 phosphate</c> for <c>po</c>. A tracer that is measured itself is
+    /// one term with factor 1. Values of end-members and samples take the offset; covariances and ratios do not.
+    /// </summary>
+    /// <param name="tracer">A tracer's id.</param>
+    /// <returns>The terms, each parent quantity once, and the additive constant in the tracer's unit.</returns>
+    public (IReadOnlyList<(string Parent, double Factor)> Terms, double Offset) FormOf(string tracer) => tracer switch
+    {
+        "no" => ([("oxygen", 1), ("nitrate", NoOxygenPerNitrate)], 0),
+        "po" => ([("oxygen", 1), ("phosphate", PoOxygenPerPhosphate)], 0),
+        "n_star" => ([("nitrate", 1), ("phosphate", -NStarNitratePerPhosphate)], NStarOffset),
+        "po4_star" => ([("phosphate", 1), ("oxygen", 1 / Po4StarOxygenPerPhosphate)], Po4StarOffset),
+        _ => ([(tracer, 1)], 0),
+    };
+
+    /// <summary>The value of a tracer from values of its parent quantities; NaN where a parent has none.</summary>
+    /// <param name="tracer">A tracer's id.</param>
+    /// <param name="values">Values by quantity id.</param>
+    public double ValueOf(string tracer, IReadOnlyDictionary<string, double> values)
+    {
+        ArgumentNullException.ThrowIfNull(values);
+        (IReadOnlyList<(string Parent, double Factor)> terms, double offset) = FormOf(tracer);
+        return terms.Sum(term => term.Factor * values.GetValueOrDefault(term.Parent, double.NaN)) + offset;
+    }
 }

@@ -33,4 +33,23 @@ public sealed record MixingModel(
 
     /// <summary>Which value is preferred where a bottle's and a CTD's exist: bottle or CTD.</summary>
     public ValueOrigin Prefer { get; init; } = ValueOrigin.Bottle;
+
+    /// <summary>True where the other holds the same content; dictionaries in any order.</summary>
+    /// <param name="other">Another one, or null.</param>
+    public bool Equals(MixingModel? other) =>
+        other is not null
+        && Name == other.Name
+        && EndMembers == other.EndMembers
+        && EndMembersFile == other.EndMembersFile
+        && Structural.Same(Tracers, other.Tracers)
+        && Fit == other.Fit
+        && Mass == other.Mass
+        && Structural.Same(Processes, other.Processes)
+        && Structural.Same(Layers, other.Layers)
+        && Structural.Same(AcceptFlags, other.AcceptFlags)
+        && Structural.Same(AcceptCtdFlags, other.AcceptCtdFlags)
+        && Prefer == other.Prefer;
+
+    /// <inheritdoc/>
+    public override int GetHashCode() => HashCode.Combine(Name, EndMembers, Structural.Hash(Tracers), Fit, Mass);
 }

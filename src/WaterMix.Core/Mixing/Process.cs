@@ -1,3 +1,5 @@
+using WaterMix.Core.EndMembers;
+
 namespace WaterMix.Core.Mixing;
 
 /// <summary>A biogeochemical column of the fit; its amount is solved with the fractions.</summary>
@@ -11,4 +13,17 @@ public sealed record Process(string Id, string Per, IReadOnlyDictionary<string, 
 
     /// <summary>Where the process acts: all conditions hold. Empty: everywhere.</summary>
     public IReadOnlyList<Condition> Where { get; init; } = [];
+
+    /// <summary>True where the other holds the same content; dictionaries in any order.</summary>
+    /// <param name="other">Another one, or null.</param>
+    public bool Equals(Process? other) =>
+        other is not null
+        && Id == other.Id
+        && Per == other.Per
+        && Structural.Same(Ratios, other.Ratios)
+        && Sign == other.Sign
+        && Structural.Same(Where, other.Where);
+
+    /// <inheritdoc/>
+    public override int GetHashCode() => HashCode.Combine(Id, Per, Structural.Hash(Ratios), Sign);
 }

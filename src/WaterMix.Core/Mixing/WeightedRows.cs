@@ -1,3 +1,5 @@
+using WaterMix.Core.EndMembers;
+
 namespace WaterMix.Core.Mixing;
 
 /// <summary>The published row-weighting recipes: standardise over the end-members, weigh, minimise the sum of squared rows.</summary>
@@ -15,4 +17,17 @@ public sealed record WeightedRows(IReadOnlyDictionary<string, double> Weights) :
 
     /// <summary>Whether a weight multiplies the row or its square.</summary>
     public WeightMeaning WeightsAre { get; init; } = WeightMeaning.RowFactors;
+
+    /// <summary>True where the other holds the same content; dictionaries in any order.</summary>
+    /// <param name="other">Another one, or null.</param>
+    public bool Equals(WeightedRows? other) =>
+        base.Equals(other)
+        && Structural.Same(Weights, other!.Weights)
+        && Standardise == other.Standardise
+        && Over == other.Over
+        && SdOver == other.SdOver
+        && WeightsAre == other.WeightsAre;
+
+    /// <inheritdoc/>
+    public override int GetHashCode() => HashCode.Combine(base.GetHashCode(), Structural.Hash(Weights), Standardise);
 }
