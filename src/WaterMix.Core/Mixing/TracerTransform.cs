@@ -1,5 +1,3 @@
-using WaterMix.Core.Quantities;
-
 namespace WaterMix.Core.Mixing;
 
 /// <summary>
@@ -39,25 +37,20 @@ public sealed class TracerTransform
     {
         ArgumentNullException.ThrowIfNull(tracers);
         ArgumentNullException.ThrowIfNull(factors);
-        var terms = tracers.Select(tracer => Terms(tracer, factors)).ToArray();
-        var parents = terms.SelectMany(t => t.Parts).Select(p => p.Parent).Distinct().ToList();
+        var terms = tracers.Select(factors.FormOf).ToArray();
+        var parents = terms.SelectMany(t => t.Terms).Select(p => p.Parent).Distinct().ToList();
         double[][] rows = [.. terms.Select(t =>
         {
             double[] row = new double[parents.Count];
-            foreach ((string parent, double factor) in t.Parts)
+            foreach ((string parent, double factor) in t.Terms)
             {
                 row[parents.IndexOf(parent)] = factor;
             }
 
             return row;
         })];
-        return new TracerTransform(tracers, parents, rows, [.. terms.Select(t => t.Constant)]);
+        return new TracerTransform(tracers, parents, rows, [.. terms.Select(t => t.Offset)]);
     }
-
-    /// <summary>The measured quantities that a tracer follows from: itself, or the two parents of a derived tracer.</summary>
-    /// <param name="tracer">A tracer id.</param>
-    public static IReadOnlyList<string> ParentsOf(string tracer) =>
-        [.. Terms(tracer, new DerivedTracerFactors()).Parts.Select(p => p.Parent)];
 
     /// <summary>T u + c, NaN where a parent of the tracer is NaN.</summary>
     /// <param name="tracer">Index of the tracer.</param>
@@ -75,20 +68,5 @@ public sealed class TracerTransform
         }
 
         return sum;
-    }
-
-    private static ((string Parent, double Factor)[] Parts, double Constant) Terms(string tracer, DerivedTracerFactors f)
-    {
-        string oxygen = Quantity.Oxygen.Id;
-        string nitrate = Quantity.Nitrate.Id;
-        string phosphate = Quantity.Phosphate.Id;
-        return tracer switch
-        {
-            "no" => ([(oxygen, 1), (nitrate, f.NoOxygenPerNitrate)], 0),
-            "po" => ([(oxygen, 1), (phosphate, f.PoOxygenPerPhosphate)], 0),
-            "n_star" => ([(nitrate, 1), (phosphate, -f.NStarNitratePerPhosphate)], f.NStarOffset),
-            "po4_star" => ([(phosphate, 1), (oxygen, 1 / f.Po4StarOxygenPerPhosphate)], f.Po4StarOffset),
-            _ => ([(tracer, 1)], 0),
-        };
     }
 }
