@@ -1,5 +1,4 @@
 using WaterMix.Core.EndMembers;
-using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
 
 namespace WaterMix.Core.Mixing;
