@@ -14,9 +14,9 @@ public static class MixingSolver
     /// <param name="model">The model, ready for fitting.</param>
     /// <param name="table">The samples; quantities that the model needs are derived where the table lacks them.</param>
     /// <param name="options">Threads, proof, cancellation.</param>
-    /// <returns>The result, one entry per sample in input order, and what the derivation of quantities noted. The result does not depend on the number of threads.</returns>
+    /// <returns>The result, one entry per sample in input order; it does not depend on the number of threads.</returns>
     /// <exception cref="OperationCanceledException">The work was cancelled.</exception>
-    public static (MixingResult Result, IReadOnlyList<Finding> Notes) Solve(PreparedModel model, SampleTable table, SolveOptions options)
+    public static SolvedBlock Solve(PreparedModel model, SampleTable table, SolveOptions options)
     {
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(table);
@@ -42,7 +42,7 @@ public static class MixingSolver
                 _ => { });
         }
 
-        return (result, values.Notes);
+        return new SolvedBlock(result, values.Notes, values.CountUsable(table.RowCount));
     }
 
     /// <summary>One thread's share of the work: a fitter and what it needs for a row.</summary>

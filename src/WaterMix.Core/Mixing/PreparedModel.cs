@@ -50,9 +50,12 @@ public sealed class PreparedModel
     /// <summary>Per parent: the relative part of its measurement error; the variance (relative * observed)^2 is added for each sample.</summary>
     internal double[] RelativeErrors { get; }
 
+    /// <summary>The measured quantities that the tracers follow from: the tracers themselves, or the parents of derived ones.</summary>
+    public IReadOnlyList<string> ParentIds => Transform.Parents;
+
     /// <summary>The quantities that the model reads from samples: parents of its tracers, and the quantities of its conditions.</summary>
     public IReadOnlyList<string> QuantityIds =>
-        [.. Transform.Parents.Concat(AllConditions.Where(c => c.Scale == DensityScale.Teos10).Select(c => c.Quantity)).Distinct()];
+        [.. Transform.Parents.Concat(AllConditions.Select(c => c.Quantity)).Distinct()];
 
     /// <summary>Every condition of the layers and the processes.</summary>
     internal IEnumerable<Condition> AllConditions =>

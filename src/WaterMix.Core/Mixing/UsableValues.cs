@@ -41,6 +41,11 @@ internal sealed class UsableValues
     /// <summary>The value of a parent quantity, NaN where it is missing or its flag is not accepted.</summary>
     public double Parent(int parent, int row) => Parents[parent]?.UsableAt(row, _accepted) ?? double.NaN;
 
+    /// <summary>For each parent quantity, the number of samples with a usable value.</summary>
+    /// <param name="rows">Number of samples.</param>
+    public long[] CountUsable(int rows) =>
+        [.. Parents.Select((_, parent) => Enumerable.Range(0, rows).LongCount(row => !double.IsNaN(Parent(parent, row))))];
+
     /// <summary>True where every condition holds for the sample.</summary>
     public bool Holds(IReadOnlyList<Condition> conditions, int row)
     {

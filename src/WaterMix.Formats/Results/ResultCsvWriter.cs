@@ -2,6 +2,7 @@ using CsvHelper;
 using WaterMix.Core.Mixing;
 using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
+using WaterMix.Formats.Reading;
 
 namespace WaterMix.Formats.Results;
 
@@ -34,17 +35,17 @@ public sealed class ResultCsvWriter : IDisposable
     /// <summary>Writes one block; the first also writes the header.</summary>
     /// <param name="block">The samples.</param>
     /// <param name="result">Their results.</param>
-    public void Write(ResultBlock block, MixingResult result)
+    public void Write(SampleBlock block, MixingResult result)
     {
         ArgumentNullException.ThrowIfNull(block);
         ArgumentNullException.ThrowIfNull(result);
         if (!_headerWritten)
         {
-            WriteHeader(block.Samples);
+            WriteHeader(block.Table);
             _headerWritten = true;
         }
 
-        SampleColumn?[] places = [.. PlaceIds.Select(block.Samples.Find)];
+        SampleColumn?[] places = [.. PlaceIds.Select(block.Table.Find)];
         for (int row = 0; row < result.RowCount; row++)
         {
             WriteRow(block, result, places, row);
@@ -80,7 +81,7 @@ public sealed class ResultCsvWriter : IDisposable
         _csv.EndRecord();
     }
 
-    private void WriteRow(ResultBlock block, MixingResult result, SampleColumn?[] places, int row)
+    private void WriteRow(SampleBlock block, MixingResult result, SampleColumn?[] places, int row)
     {
         if (_namesFiles)
         {
@@ -89,7 +90,7 @@ public sealed class ResultCsvWriter : IDisposable
         }
 
         _csv.WriteField(block.FirstRow + row);
-        foreach (IdentityColumn column in block.Samples.Identity)
+        foreach (IdentityColumn column in block.Table.Identity)
         {
             _csv.WriteField(column[row]);
         }
