@@ -119,7 +119,7 @@ public static class ColumnGuess
         if (!header.HasWhpNames && key.Length >= 5 && !key.Any(char.IsAsciiDigit) && NearestName.Of(key, KnownNames.Long) is { } suggestion)
         {
             notes.Add(new Finding(Severity.Warning, "a known column name", $"'{column.Name}', which is near to '{suggestion}'", "It was kept as a further tracer. Rename it if that is what it is, or say so in a match file (--columns).")
-            { File = header.File.Name, Line = header.LastLine, Column = column.Name });
+            { File = header.File.Name, Line = header.NamesLine, Column = column.Name });
         }
 
         Quantity further = Quantity.Further(name, "");
@@ -191,7 +191,7 @@ public static class ColumnGuess
             : Stem(column, OtherFlagEndings) is not null
                 ? new Finding(Severity.Warning, "WHP flags (_FLAG_W or _flag)", $"flags of another scheme in '{column.Name}'", "They were not used. If they are WHP flags, say so in a match file (--columns, \"flag\").")
                 : new Finding(Severity.Note, "a column to go with every flag, source or scale", $"'{column.Name}' alone", "It was left out.");
-        return finding with { File = header.File.Name, Line = header.LastLine, Column = column.Name };
+        return finding with { File = header.File.Name, Line = header.NamesLine, Column = column.Name };
     }
 
     // Where a file has no sample numbers, the bottle number tells the samples of a cast apart.
@@ -205,7 +205,7 @@ public static class ColumnGuess
             {
                 if (!hasSample)
                 {
-                    notes.Add(new Finding(Severity.Note, "sample numbers", $"none, but bottle numbers in '{column.Name}'", "They are used as the sample column.") { File = header.File.Name, Line = header.LastLine, Column = column.Name });
+                    notes.Add(new Finding(Severity.Note, "sample numbers", $"none, but bottle numbers in '{column.Name}'", "They are used as the sample column.") { File = header.File.Name, Line = header.NamesLine, Column = column.Name });
                 }
 
                 matches.Add(match with { Identity = hasSample ? null : "sample" });

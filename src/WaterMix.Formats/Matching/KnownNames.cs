@@ -1,6 +1,7 @@
 using System.Collections.Frozen;
 using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
+using WaterMix.Formats.WhpExchange;
 
 namespace WaterMix.Formats.Matching;
 
@@ -56,9 +57,9 @@ internal static class KnownNames
     /// <summary>The names under which a file says what its nitrate column holds.</summary>
     public static readonly FrozenSet<string> NitrateKinds = FrozenSet.ToFrozenSet(["nitrate_kind", "nitrate_type"], StringComparer.Ordinal);
 
-    /// <summary>The names that a misspelling may be near to: ids first, then the others of five letters and more.</summary>
+    /// <summary>The names that a misspelling may be near to: ids first, then the others of five letters and more, without WHP's clipped ones.</summary>
     public static IReadOnlyList<string> Long { get; } =
-        [.. Quantity.All.Select(q => q.Id).Concat(Quantities.Keys).Concat(Identities.Keys).Where(n => n.Length >= 5).Distinct()];
+        [.. Quantity.All.Select(q => q.Id).Concat(Quantities.Keys).Concat(Identities.Keys).Where(n => n.Length >= 5 && ExchangeNames.FindQuantity(n.ToUpperInvariant()) is null).Distinct()];
 
     /// <summary>The identity column of a name: <see cref="IdentityColumn.Ids"/>, <c>date</c>, <c>bottle_flag</c> or <c>bottle</c>; or null.</summary>
     /// <param name="key">A name as <see cref="Key"/> makes it.</param>

@@ -5,8 +5,9 @@ namespace WaterMix.Formats.Reading;
 /// <param name="Format">Its kind.</param>
 /// <param name="Columns">Its columns, those of a CTD header's constants first.</param>
 /// <param name="FieldCount">Number of fields in a data row.</param>
+/// <param name="NamesLine">The physical line of the column names.</param>
 /// <param name="LastLine">The physical line of the last header or unit line.</param>
-public sealed record FileHeader(InputFile File, SampleFormat Format, IReadOnlyList<SourceColumn> Columns, int FieldCount, long LastLine)
+public sealed record FileHeader(InputFile File, SampleFormat Format, IReadOnlyList<SourceColumn> Columns, int FieldCount, long NamesLine, long LastLine)
 {
     /// <summary>The delimiter.</summary>
     public char Delimiter { get; init; } = ',';

@@ -8,7 +8,7 @@ namespace WaterMix.Formats.Reading;
 /// <summary>From a header, and a match file if there is one, to what is read from the file.</summary>
 internal sealed class FilePlanner(FileHeader header, ReadingOptions options, FindingList findings)
 {
-    private readonly Dictionary<string, SourceColumn> _byName = header.Columns.DistinctBy(c => c.Name).ToDictionary(c => c.Name, StringComparer.Ordinal);
+    private readonly Dictionary<string, SourceColumn> _byName = header.Columns.ToDictionary(c => c.Name, StringComparer.Ordinal);
 
     /// <summary>The plan for the file; problems become findings.</summary>
     public FilePlan Plan()
@@ -38,7 +38,7 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
         if (columns.All(c => c.By == MatchedBy.OwnName) && identity.Count == 0)
         {
             findings.Add(new Finding(Severity.Error, "column names of samples, such as station, latitude, pressure, oxygen", $"a first line with none of them ('{string.Join("', '", header.Columns.Take(3).Select(c => c.Name))}', ...)", "Begin the table with a header line, or name its columns in a match file (--columns).")
-            { File = header.File.Name, Line = header.LastLine });
+            { File = header.File.Name, Line = header.NamesLine });
         }
 
         return new FilePlan(header, columns, identity, bottleFlag, matches);
@@ -75,7 +75,7 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
         }
 
         return [.. said.Select(m => m with { Flag = Present(m.Flag), UnitColumn = Present(m.UnitColumn), Source = Present(m.Source) })
-            .OrderBy(m => header.Columns.ToList().FindIndex(c => c.Name == m.Column))];
+            .OrderBy(m => _byName[m.Column].Index)];
     }
 
     private string? Present(string? name) => name is not null && _byName.ContainsKey(name) ? name : null;
@@ -200,8 +200,8 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
     private bool IsNeeded(string quantity) => options.NeededQuantities?.Contains(quantity) == true;
 
     private void Report(Severity severity, SourceColumn column, string expected, string found, string remedy) =>
-        findings.Add(new Finding(severity, expected, found, remedy) { File = header.File.Name, Line = header.LastLine, Column = column.Name });
+        findings.Add(new Finding(severity, expected, found, remedy) { File = header.File.Name, Line = header.NamesLine, Column = column.Name });
 
     private void Fold(Severity severity, string kind, SourceColumn column, string expected, string found, string remedy) =>
-        findings.Fold(kind, column.Name, () => new Finding(severity, expected, found, remedy) { File = header.File.Name, Line = header.LastLine, Column = column.Name });
+        findings.Fold(kind, column.Name, () => new Finding(severity, expected, found, remedy) { File = header.File.Name, Line = header.NamesLine, Column = column.Name });
 }

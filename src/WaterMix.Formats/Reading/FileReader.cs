@@ -137,7 +137,7 @@ internal sealed class FileReader
                 {
                     int found = csv.FieldCount;
                     long line = csv.LineNumber;
-                    _findings.Fold("width " + _file, null, () => new Finding(Severity.Error, $"{header.FieldCount} columns, as in the header", $"{found}", "Mend the rows, or quote cells that hold the delimiter.") { File = _file, Line = line });
+                    _findings.Fold("width " + _file, null, () => new Finding(Severity.Error, $"{header.FieldCount} columns, as in the header", $"{found}", "Mend the rows: a cell that holds the delimiter (a decimal comma too) is two cells unless it is quoted.") { File = _file, Line = line });
                     continue;
                 }
 
@@ -303,14 +303,17 @@ internal sealed class FileReader
             return QualityFlags.NoFlag;
         }
 
-        if (NumberText.TryParse(field, _decimalMark, out double number) && (number == -999 || double.IsNaN(number)))
+        if (NumberText.TryParse(field, _decimalMark, out double number))
         {
-            return QualityFlags.NoFlag;
-        }
+            if (number == -999 || double.IsNaN(number))
+            {
+                return QualityFlags.NoFlag;
+            }
 
-        if (number is >= 0 and <= 9 && number == Math.Floor(number))
-        {
-            return (byte)number;
+            if (number is >= 0 and <= 9 && number == Math.Floor(number))
+            {
+                return (byte)number;
+            }
         }
 
         string found = FieldText.Quote(field);

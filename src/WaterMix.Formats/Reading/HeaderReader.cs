@@ -63,8 +63,11 @@ internal static class HeaderReader
                 continue;
             }
 
-            columns.Add(column);
-            if (!first.TryAdd(column.Name, i))
+            if (first.TryAdd(column.Name, i))
+            {
+                columns.Add(column);
+            }
+            else
             {
                 findings.Add(new Finding(Severity.Error, "every header name once", $"'{column.Name}' as column {first[column.Name] + 1} and column {i + 1}", "Rename or delete one of the two.")
                 { File = file.Name, Line = line, Column = column.Name });
@@ -146,7 +149,7 @@ internal static class HeaderReader
         if (!declared && OtherDelimiter(csv.RawRecord) is { } other)
         {
             string shown = other == '\t' ? "tab" : $"'{other}'";
-            findings.Add(new Finding(Severity.Error, "columns delimited by commas", $"{shown} as the delimiter", $"Declare it in a match file (--columns, \"delimiter\": \"{(other == '\t' ? "\\t" : other)}\"), or save with commas.")
+            findings.Add(new Finding(Severity.Error, "columns delimited by commas", $"{shown} as the delimiter", $"Declare it in a match file (--columns, \"delimiter\": \"{(other == '\t' ? "\\t" : other)}\", and \"decimalMark\": \",\" if the numbers have decimal commas), or save with commas.")
             { File = file.Name, Line = line });
             return null;
         }
@@ -161,7 +164,7 @@ internal static class HeaderReader
         }
 
         List<SourceColumn> columns = Columns(file, names, units, line, findings);
-        return new FileHeader(file, SampleFormat.Csv, columns, fieldCount, lastLine)
+        return new FileHeader(file, SampleFormat.Csv, columns, fieldCount, line, lastLine)
         {
             Delimiter = delimiter,
             HasComments = hasComments,

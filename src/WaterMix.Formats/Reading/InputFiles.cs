@@ -88,7 +88,7 @@ internal sealed class InputFiles : IDisposable
 
         long total = 0;
         int passed = 0;
-        int taken = 0;
+        int tabular = 0;
         foreach (ZipArchiveEntry entry in archive.Entries.Where(e => e.Name.Length > 0).OrderBy(e => e.Name, StringComparer.Ordinal).ThenBy(e => e.FullName, StringComparer.Ordinal))
         {
             if (!entry.Name.EndsWith(".csv", StringComparison.OrdinalIgnoreCase) || entry.Name.StartsWith('.'))
@@ -97,6 +97,7 @@ internal sealed class InputFiles : IDisposable
                 continue;
             }
 
+            tabular++;
             total += entry.Length;
             if (entry.Length > 1 << 20 && entry.Length / Math.Max(1, entry.CompressedLength) > MostRatio)
             {
@@ -109,7 +110,6 @@ internal sealed class InputFiles : IDisposable
                 continue;
             }
 
-            taken++;
             Files.Add(new InputFile($"{name}/{entry.Name}", () => new BoundedStream(entry.Open(), entry.Length)));
         }
 
@@ -118,7 +118,7 @@ internal sealed class InputFiles : IDisposable
             findings.Add(new Finding(Severity.Error, $"at most {MostBytes >> 30} GB in a zip file", $"{total >> 30} GB", "Pack the casts into several archives.") { File = name });
             Files.Clear();
         }
-        else if (taken == 0)
+        else if (tabular == 0)
         {
             findings.Add(new Finding(Severity.Error, "sample files (.csv) in the zip file", $"none among {archive.Entries.Count} entries", "Pack the .csv files of the casts.") { File = name });
         }

@@ -46,6 +46,6 @@ public static class SampleReader
             findings.Add(new Finding(Severity.Error, $"the column '{column}' that the match file names", "no such column in any file", "Correct the match file.") { Column = column });
         }
 
-        return new OpenedSamples(plans, TableSchema.Union(plans), options, perKilogram, findings, inputs);
+        return new OpenedSamples(plans, TableSchema.Union(plans, options.NeededQuantities, findings), options, perKilogram, findings, inputs);
     }
 }

@@ -1,3 +1,4 @@
+using WaterMix.Core;
 using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
 using WaterMix.Formats.Matching;
@@ -71,18 +72,32 @@ internal sealed class TableSchema
     public bool HasBottleFlags { get; }
 
     /// <summary>The union of what the plans read.</summary>
-    public static TableSchema Union(IReadOnlyList<FilePlan> plans)
+    /// <param name="plans">The plans, in the order of the files.</param>
+    /// <param name="needed">The quantities that the caller needs, or null.</param>
+    /// <param name="findings">Where units that differ from file to file go.</param>
+    public static TableSchema Union(IReadOnlyList<FilePlan> plans, IReadOnlySet<string>? needed, FindingList findings)
     {
         bool hasBottleFlags = plans.Any(p => p.BottleFlag is not null);
         var present = plans.SelectMany(p => p.Identity.Keys).Select(id => id == "date" ? "time" : id).ToHashSet(StringComparer.Ordinal);
         var byId = new Dictionary<string, SchemaQuantity>(StringComparer.Ordinal);
         var order = new List<string>();
-        foreach (PlannedColumn column in plans.SelectMany(p => p.Columns))
+        foreach ((FilePlan plan, PlannedColumn column) in plans.SelectMany(p => p.Columns.Select(c => (p, c))))
         {
             if (!byId.TryGetValue(column.Quantity.Id, out SchemaQuantity? quantity))
             {
                 quantity = new SchemaQuantity(column.Quantity) { By = column.By };
                 order.Add(column.Quantity.Id);
+            }
+            else if (quantity.Quantity.Unit.Length == 0)
+            {
+                // Only a further tracer can lack a unit; another file may know it.
+                quantity = quantity with { Quantity = column.Quantity };
+            }
+            else if (column.Quantity.Unit.Length > 0 && Units.Normalise(column.Quantity.Unit) != Units.Normalise(quantity.Quantity.Unit))
+            {
+                Severity severity = needed?.Contains(column.Quantity.Id) == false ? Severity.Warning : Severity.Error;
+                findings.Fold("units differ", column.Quantity.Id, () => new Finding(severity, $"{column.Quantity.Id} in {quantity.Quantity.Unit}, as in the files before", column.Quantity.Unit, "Bring the files to one unit, or read them apart.")
+                { File = plan.Header.File.Name, Line = plan.Header.NamesLine, Column = column.Column.Name });
             }
 
             byId[column.Quantity.Id] = With(quantity, column, hasBottleFlags);

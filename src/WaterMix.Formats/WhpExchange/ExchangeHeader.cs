@@ -49,7 +49,7 @@ internal static class ExchangeHeader
         }
 
         List<SourceColumn> columns = HeaderReader.Columns(file, names, units, line, findings);
-        return new FileHeader(file, isCtd ? SampleFormat.ExchangeCtd : SampleFormat.ExchangeBottle, [.. constants, .. columns], names.Count, lastLine)
+        return new FileHeader(file, isCtd ? SampleFormat.ExchangeCtd : SampleFormat.ExchangeBottle, [.. constants.Where(c => columns.TrueForAll(other => other.Name != c.Name)), .. columns], names.Count, line, lastLine)
         {
             HasComments = true,
             HasWhpNames = true,
@@ -82,7 +82,7 @@ internal static class ExchangeHeader
             {
                 declared = long.TryParse(value, CultureInfo.InvariantCulture, out long n) ? n : -1;
             }
-            else
+            else if (constants.TrueForAll(c => c.Name != name))
             {
                 constants.Add(new SourceColumn(-1, name, name, "") { Constant = Encoding.UTF8.GetBytes(value) });
             }
