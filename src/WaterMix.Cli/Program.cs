@@ -6,6 +6,7 @@ var root = new RootCommand("Apportions sea water samples into source waters: wat
     SolveCommand.Create(),
     InspectCommand.Create(),
     ConvertCommand.Create(),
+    ConvertSetCommand.Create(),
 };
 
 try
