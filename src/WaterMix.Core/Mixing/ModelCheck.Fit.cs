@@ -40,7 +40,11 @@ public static partial class ModelCheck
         {
             for (int i = 0; i < covariance.Tracers.Count; i++)
             {
-                EndMemberSetCheck.IsKnown(covariance.Tracers[i], model.EndMembers, JsonPointer.Append(At + "/tracers", i), findings);
+                string at = JsonPointer.Append(At + "/tracers", i);
+                if (EndMemberSetCheck.IsKnown(covariance.Tracers[i], model.EndMembers, at, findings))
+                {
+                    NoteUnlessFitted(covariance.Tracers[i], parents, at, "a measurement error", findings);
+                }
             }
 
             TracerMatrixCheck.Covariance(covariance, At, findings);

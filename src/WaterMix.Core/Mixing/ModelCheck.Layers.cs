@@ -45,7 +45,7 @@ public static partial class ModelCheck
             findings.Error(at, "at least one end-member", "none", "Name the sources that may be found in this layer.");
         }
 
-        string[] known = [.. model.EndMembers.EndMembers.Select(e => e.Id)];
+        var known = model.EndMembers.EndMembers.Select(e => e.Id).ToHashSet(StringComparer.Ordinal);
         var seen = new HashSet<string>(StringComparer.Ordinal);
         for (int i = 0; i < layer.EndMembers.Count; i++)
         {

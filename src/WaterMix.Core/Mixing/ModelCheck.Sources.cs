@@ -72,11 +72,14 @@ public static partial class ModelCheck
     private static void Twins(MixingModel model, Layer layer, FindingList findings)
     {
         List<(int Index, EndMember EndMember)> permitted = Permitted(model, layer);
-        double[][] values = [.. permitted.Select(p => Rows(model).Select(row => model.Fit.Factors.ValueOf(row.Tracer, p.EndMember.Values)).ToArray())];
-        for (int j = 1; j < permitted.Count; j++)
+        string[] rows = [.. Rows(model).Select(row => row.Tracer)];
+        var firstWith = new Dictionary<string, int>(StringComparer.Ordinal);
+        for (int j = 0; j < permitted.Count; j++)
         {
-            int i = Array.FindIndex(values, 0, j, other => other.SequenceEqual(values[j]) && Array.TrueForAll(other, double.IsFinite));
-            if (i >= 0 && values[j].Length > 0)
+            double[] values = [.. rows.Select(tracer => model.Fit.Factors.ValueOf(tracer, permitted[j].EndMember.Values))];
+            string key = string.Join(' ', values.Select(Text));
+            bool isComplete = values.Length > 0 && Array.TrueForAll(values, double.IsFinite);
+            if (isComplete && !firstWith.TryAdd(key, j) && firstWith[key] is var i)
             {
                 findings.Warning(
                     EndMemberPath(permitted[j].Index),

@@ -1,5 +1,6 @@
 using WaterMix.Core.EndMembers;
 using WaterMix.Core.Mixing;
+using WaterMix.Core.Seawater;
 
 namespace WaterMix.Core.Tests.Mixing;
 
@@ -162,6 +163,21 @@ public class ModelCheckTests
             ["/fit/measurementSd/oxygen", "/fit/measurementSd/nitrate"],
             Errors(model with { Fit = new GeneralisedLeastSquares() }).Select(f => f.Path));
         Assert.Empty(Errors(model with { Fit = Rows(["no"]) }));
+    }
+
+    // Agreement: the linear form that end-members and errors go through, and the formulas that samples go through.
+    [Fact]
+    public void Findings_DerivedTracers_HaveTheValuesThatSamplesHave()
+    {
+        var factors = new DerivedTracerFactors { NoOxygenPerNitrate = 9.5, NStarOffset = 3, Po4StarOxygenPerPhosphate = 165 };
+        var values = new Dictionary<string, double> { ["oxygen"] = 231.5, ["nitrate"] = 17.25, ["phosphate"] = 1.375 };
+
+        Assert.Equal(DerivedTracers.No(231.5, 17.25, factors), factors.ValueOf("no", values), 1e-12);
+        Assert.Equal(DerivedTracers.Po(231.5, 1.375, factors), factors.ValueOf("po", values), 1e-12);
+        Assert.Equal(DerivedTracers.NStar(17.25, 1.375, factors), factors.ValueOf("n_star", values), 1e-12);
+        Assert.Equal(DerivedTracers.Po4Star(1.375, 231.5, factors), factors.ValueOf("po4_star", values), 1e-12);
+        Assert.Equal(17.25, factors.ValueOf("nitrate", values));
+        Assert.Equal(double.NaN, factors.ValueOf("silicate", values));
     }
 
     [Fact]

@@ -193,6 +193,32 @@ public class MixingModelFileTests
     }
 
     [Fact]
+    public void Read_CommaTooManyAndFaultOfMeaning_ListsBoth()
+    {
+        string text = HalcyonModel.Json.Replace("\"bottle\" }", "\"bottle\" },", StringComparison.Ordinal).Replace("\"MSW\"]", "\"MWS\"]", StringComparison.Ordinal);
+
+        Assert.Equal(["/layers/0/endMembers/2", null], Read(text).Findings.Where(f => f.Severity == Severity.Error).Select(f => f.Path));
+    }
+
+    [Fact]
+    public void Read_TenThousandEndMembers_NotesWhatIsAssumedForEach()
+    {
+        IEnumerable<string> members = Enumerable.Range(0, 10_000).Select(i => $$"""
+            { "id": "E{{i}}", "name": "", "values": { "oxygen": {{i % 900}}, "nitrate": {{i % 31}} }, "sd": { "oxygen": 1 }, "provenance": { "kind": "samples" } }
+            """);
+        string set = $$"""{ "schema": "watermix/end-member-set/1", "name": "", "version": 1, "endMembers": [{{string.Join(",\n", members)}}] }""";
+        string model = """
+            { "schema": "watermix/mixing-model/1", "name": "", "endMembers": { "file": "x" }, "tracers": ["oxygen", "nitrate"],
+              "fit": { "kind": "weighted-rows", "weights": { "oxygen": 1, "nitrate": 2 } }, "massConservation": { "kind": "exact" } }
+            """;
+
+        Reading<MixingModel> reading = MixingModelFile.Read(Encoding.UTF8.GetBytes(model), "m", _ => (Encoding.UTF8.GetBytes(set), "s"));
+
+        Assert.Equal(10_000, reading.Value!.EndMembers.EndMembers.Count);
+        Assert.Equal(20_001, reading.Findings.Count);
+    }
+
+    [Fact]
     public void Read_FromDisk_ResolvesTheSetBesideTheModel()
     {
         string folder = Directory.CreateTempSubdirectory("watermix-model-").FullName;
