@@ -18,11 +18,8 @@ public sealed class PreparedModel
         (MeasurementCovariance, HasMeasurementError) = Measurement(model.Fit, covariance, transform);
         RelativeErrors = [.. transform.Parents.Select(p =>
             covariance?.Tracers.Contains(p) == true ? 0 : model.Fit.MeasurementSd.GetValueOrDefault(p)?.Relative ?? 0)];
-        IReadOnlyList<Layer> layers = model.Layers.Count > 0
-            ? model.Layers
-            : [new Layer("all", [.. model.EndMembers.EndMembers.Select(e => e.Id)], [])];
-        Layers = [.. layers.Select(Prepare)];
-        LayerIds = [.. layers.Select(l => l.Id)];
+        Layers = [.. model.LayersOrAll.Select(Prepare)];
+        LayerIds = [.. Layers.Select(l => l.Id)];
     }
 
     /// <summary>The model.</summary>
