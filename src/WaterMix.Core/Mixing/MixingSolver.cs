@@ -5,7 +5,7 @@ using WaterMix.Core.Samples;
 
 namespace WaterMix.Core.Mixing;
 
-/// <summary>Apportions samples: every sample comes out with fractions, amounts and residuals, or with a status that says why not.</summary>
+/// <summary>Apportions samples (<c>Tomczak1981</c>): every sample comes out with fractions, amounts and residuals, or with a status that says why not.</summary>
 public static class MixingSolver
 {
     private const int ChunkRows = 1024;
