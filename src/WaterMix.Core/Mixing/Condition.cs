@@ -9,8 +9,11 @@ public sealed record Condition(string Quantity, double? AtLeast, double? LessTha
     /// <summary>Which equation of state a sigma condition tests.</summary>
     public DensityScale Scale { get; init; } = DensityScale.Teos10;
 
-    /// <summary>True where the value is in the range; a longitude range whose start exceeds its end wraps round.</summary>
-    /// <param name="value">The sample's value in the quantity's unit; NaN is missing.</param>
+    /// <summary>
+    /// True where the value is in the range. A longitude range whose start exceeds its end wraps round, and its bounds may count to 360
+    /// as well as from -180: both name the same meridians.
+    /// </summary>
+    /// <param name="value">The sample's value in the quantity's unit, longitude in [-180, 180); NaN is missing.</param>
     public bool Holds(double value)
     {
         if (double.IsNaN(value))
@@ -18,9 +21,15 @@ public sealed record Condition(string Quantity, double? AtLeast, double? LessTha
             return false;
         }
 
+        if (Quantity == Quantities.Quantity.Longitude.Id && AtLeast is { } start && LessThan is { } end && (start > end || end > 180))
+        {
+            double width = end - start;
+            double eastOfStart = value - start;
+            return (eastOfStart < 0 ? eastOfStart + 360 : eastOfStart) < (width < 0 ? width + 360 : width);
+        }
+
         bool above = AtLeast is not { } low || value >= low;
         bool below = LessThan is not { } high || value < high;
-        bool wraps = Quantity == "longitude" && AtLeast > LessThan;
-        return wraps ? above || below : above && below;
+        return above && below;
     }
 }

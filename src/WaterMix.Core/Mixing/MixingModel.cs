@@ -25,6 +25,9 @@ public sealed record MixingModel(
     /// <summary>The layers; a sample belongs to the first that takes it. Empty: one layer <c>all</c> with every end-member.</summary>
     public IReadOnlyList<Layer> Layers { get; init; } = [];
 
+    /// <summary>The layers that samples are sorted into: <see cref="Layers"/>, or where there are none, one layer <c>all</c> with every end-member.</summary>
+    public IReadOnlyList<Layer> LayersOrAll => Layers.Count > 0 ? Layers : [new Layer("all", [.. EndMembers.EndMembers.Select(e => e.Id)], [])];
+
     /// <summary>WHP water-sample flags that count as usable.</summary>
     public IReadOnlyList<int> AcceptFlags { get; init; } = [2, 6];
 

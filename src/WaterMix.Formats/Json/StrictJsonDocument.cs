@@ -74,4 +74,29 @@ public sealed class StrictJsonDocument
     /// <summary>Adds a finding, located as <see cref="Located"/> does.</summary>
     /// <param name="finding">The finding.</param>
     public void Add(Finding finding) => _findings.Add(Located(finding));
+
+    /// <summary>
+    /// Adds the findings of a check of the meaning, but none about a place (or within or around one) that already has an error: what
+    /// could not be read would only be reported a second time.
+    /// </summary>
+    /// <param name="findings">Findings whose paths point into this document.</param>
+    public void AddMeaning(IEnumerable<Finding> findings)
+    {
+        ArgumentNullException.ThrowIfNull(findings);
+        string[] faulty = [.. _findings.Where(f => f.Severity == Severity.Error && f.Path is not null).Select(f => f.Path!)];
+        foreach (Finding finding in findings)
+        {
+            if (!Array.Exists(faulty, at => JsonPointer.IsWithin(finding.Path ?? "", at) || JsonPointer.IsWithin(at, finding.Path ?? "")))
+            {
+                Add(finding);
+            }
+        }
+    }
+
+    /// <summary>The end of a reading: the findings in the order of their lines, and the value unless one of them is an error.</summary>
+    /// <typeparam name="T">What the document holds.</typeparam>
+    /// <param name="value">What was read from it, or null.</param>
+    public Reading<T> Finish<T>(T? value)
+        where T : class =>
+        new(HasErrors ? null : value, [.. _findings.OrderBy(f => f.Line ?? long.MaxValue)]);
 }

@@ -77,6 +77,10 @@ public sealed class StrictJsonNode
     /// <summary>A text; it may be empty.</summary>
     public string? AsText() => Is(JsonValueKind.String, "text in double quotes") ? _text : null;
 
+    /// <summary>True where the value is this very text.</summary>
+    /// <param name="text">The text.</param>
+    public bool IsText(string text) => Kind == JsonValueKind.String && _text == text;
+
     /// <summary>A finite number.</summary>
     public double? AsNumber()
     {
@@ -159,6 +163,11 @@ public sealed class StrictJsonNode
     /// <param name="remedy">What to do, as a sentence.</param>
     public void Report(string expected, string found, string remedy) =>
         _document.Add(new Finding(Severity.Error, expected, found, remedy) { Path = Path, Line = Line });
+
+    /// <summary>Adds an error about a key that this object lacks; its place is where the key belongs.</summary>
+    /// <param name="key">The key.</param>
+    public void ReportMissing(string key) =>
+        _document.Add(new Finding(Severity.Error, $"the key \"{key}\"", "none", $"Add \"{key}\" here.") { Path = JsonPointer.Append(Path, key), Line = Line });
 
     /// <summary>The value as a phrase for a finding: <c>the text "3,1"</c>, <c>the number 1e999</c>, <c>a list</c>, ...</summary>
     public string Described() => Kind switch

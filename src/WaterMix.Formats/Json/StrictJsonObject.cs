@@ -22,7 +22,7 @@ public sealed class StrictJsonObject
         StrictJsonNode? child = Node.Child(key);
         if (child is null)
         {
-            Node.Report($"the key \"{key}\"", "none", $"Add \"{key}\" here.");
+            Node.ReportMissing(key);
         }
 
         return child;

@@ -138,7 +138,8 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
             case JsonTokenType.String:
                 string? text = Text(ref reader, path);
                 return new StrictJsonNode(document, path, key, text is null ? JsonValueKind.Undefined : JsonValueKind.String, line, text ?? "", []);
-            case JsonTokenType.Number when _blanked.ContainsKey(offset):
+            case JsonTokenType.Number when _blanked.TryGetValue(offset, out Finding? finding):
+                _blanked[offset] = finding with { Path = path };
                 return new StrictJsonNode(document, path, key, JsonValueKind.Undefined, line, "", []);
             case JsonTokenType.Number:
                 return new StrictJsonNode(document, path, key, JsonValueKind.Number, line, Encoding.ASCII.GetString(reader.ValueSpan), []);

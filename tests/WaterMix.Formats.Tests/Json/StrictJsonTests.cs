@@ -114,7 +114,7 @@ public class StrictJsonTests
         Assert.Null(root.Required("b")!.AsBoolean());
         Assert.Null(root.Required("absent"));
 
-        Assert.Equal(["/n", "/t", "/l", "/o", "/i", "/big", "/c", "/null", "/b", ""], document.Findings.Select(f => f.Path));
+        Assert.Equal(["/n", "/t", "/l", "/o", "/i", "/big", "/c", "/null", "/b", "/absent"], document.Findings.Select(f => f.Path));
         Assert.Equal(
             ["the text \"3,1\"", "the number 3", "an object", "a list", "the number 2.5", "the number 1e999", "the text \"exat\"", "null", "the number 0", "none"],
             document.Findings.Select(f => f.Found));
