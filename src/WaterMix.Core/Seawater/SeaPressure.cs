@@ -3,7 +3,7 @@ namespace WaterMix.Core.Seawater;
 /// <summary>Sea pressure at a depth (TEOS-10).</summary>
 public static class SeaPressure
 {
-    /// <summary>The inverse of <see cref="Depth.FromPressure"/>, good to 2e-10 dbar.</summary>
+    /// <summary>The inverse of <see cref="Depth.FromPressure"/>, good to 1e-8 dbar.</summary>
     /// <param name="depthM">Depth below the sea surface, m, positive downwards, -5 to 12,000.</param>
     /// <param name="latitudeDeg">Latitude, degrees north, -90 to 90.</param>
     /// <returns>Sea pressure, dbar. NaN where an input is NaN, the depth is above -5 m or the latitude is outside its range.</returns>
