@@ -85,11 +85,14 @@ public sealed class Cruise
     {
         Water water = Water.At(station.Along, pressure).Rounded();
         double[] parcel = water.Tracers(station.Along, pressure);
+
+        // The wind has mixed the parcels of the uppermost layer.
+        double unmixed = 1 - Water.Summer(pressure);
         for (int t = 0; t < parcel.Length; t++)
         {
             for (int i = 0; i < water.Fractions.Length; i++)
             {
-                parcel[t] += water.Fractions[i] * Sources.Spread[i][t] * _noise.Normal(Purpose.SourceSpread + i, station.Number, level, t);
+                parcel[t] += unmixed * water.Fractions[i] * Sources.Spread[i][t] * _noise.Normal(Purpose.SourceSpread + i, station.Number, level, t);
             }
         }
 

@@ -13,7 +13,7 @@ public static class Models
     /// The TEOS-10 sigma2 between the layers, kg/m3. At every station the thermocline water ends above it and the bottom water begins
     /// below it, so that each layer's sources are all that a sample there can hold.
     /// </summary>
-    public const double LayerSigma2 = 36.65;
+    public const double LayerSigma2 = 36.6;
 
     /// <summary>Above this pressure, dbar, summer and the air have changed the water: no mixture of the sources.</summary>
     public const double MixedLayer = 150;
@@ -42,7 +42,7 @@ public static class Models
     {
         EndMembersFile = SetFile,
         Processes = [Sources.Respiration],
-        Layers = [new Layer("deepest", ["NDW", "SBW"], [new Condition(Quantity.Pressure.Id, 2700, null)])],
+        Layers = [new Layer("deepest", ["NDW", "SBW"], [new Condition(Quantity.Pressure.Id, 2900, null)])],
     };
 
     private static IReadOnlyList<string> SimpleTracers => [.. Sources.Tracers.Where(t => t != Quantity.Silicate.Id)];

@@ -26,10 +26,10 @@ public sealed record Water(double[] Fractions, double Respiration, double Opal)
         double msw = 0.44 * s * s * Shape.Bump((p - 1050) / (p < 1050 ? 600 : 1000));
         double pastRidge = Shape.Step((s - 0.47) / 0.16);
         double sbwAtFloor = 0.93 - (0.2 * s) - (0.28 * pastRidge);
-        double sbwTop = 2200 + (600 * s) + (200 * pastRidge);
+        double sbwTop = 2000 + (500 * s) + (150 * pastRidge);
         double sbw = sbwAtFloor * Shape.Step((p - sbwTop) / (4900 - sbwTop));
         double rest = 1 - htw - msw - sbw;
-        double ndwShare = Shape.Step((p - (700 - (200 * s))) / (1900 - (100 * s)));
+        double ndwShare = Shape.Step((p - (540 - (60 * s))) / (2300 - (100 * s)));
         double ndw = rest * ndwShare;
         double hiw = rest - ndw;
 
@@ -49,13 +49,17 @@ public sealed record Water(double[] Fractions, double Respiration, double Opal)
         return new Water([.. counts.Select(c => c / 10_000.0)], Math.Round(Respiration, 4), Math.Round(Opal, 4));
     }
 
+    /// <summary>How far summer and the air have changed the water: 1 down to 30 dbar, 0 below the winter's mixed layer.</summary>
+    /// <param name="pressure">Sea pressure, dbar.</param>
+    public static double Summer(double pressure) => Shape.Step((Models.MixedLayer - pressure) / 120);
+
     /// <summary>The tracers of this water, the mixed layer's summer included.</summary>
     /// <param name="along">As in <see cref="At"/>.</param>
     /// <param name="pressure">Sea pressure, dbar.</param>
     public double[] Tracers(double along, double pressure)
     {
         double[] values = Sources.Mix(Fractions, Respiration, Opal);
-        double summer = Shape.Step((Models.MixedLayer - pressure) / 120);
+        double summer = Summer(pressure);
         if (summer > 0)
         {
             values[0] += summer * (3.5 + (2 * along));
