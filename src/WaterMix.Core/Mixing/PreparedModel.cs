@@ -1,5 +1,7 @@
 using WaterMix.Core.EndMembers;
+using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
+using WaterMix.Core.Seawater;
 
 namespace WaterMix.Core.Mixing;
 
@@ -55,7 +57,11 @@ public sealed class PreparedModel
 
     /// <summary>The quantities that the model reads from samples: parents of its tracers, and the quantities of its conditions.</summary>
     public IReadOnlyList<string> QuantityIds =>
-        [.. Transform.Parents.Concat(AllConditions.Select(c => c.Quantity)).Distinct()];
+        [.. Transform.Parents.Concat(AllConditions.Where(c => c.Scale == DensityScale.Teos10).Select(c => c.Quantity)).Distinct()];
+
+    /// <summary>The quantities that files must bring for this model: those it reads, and what they are derived from.</summary>
+    public IReadOnlySet<string> InputIds =>
+        SampleDerivation.InputsOf([.. QuantityIds, .. AllConditions.Where(c => c.Scale == DensityScale.Eos80).Select(_ => Quantity.PotentialTemperature.Id)]);
 
     /// <summary>Every condition of the layers and the processes.</summary>
     internal IEnumerable<Condition> AllConditions =>

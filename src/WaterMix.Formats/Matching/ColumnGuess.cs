@@ -115,7 +115,8 @@ public static class ColumnGuess
             return match with { Identity = "bottle", By = MatchedBy.WhpName };
         }
 
-        if (!header.IsExchange && Spelling.Nearest(key, KnownNames.All) is { } suggestion)
+        // Short names and names with digits are near to each other without being misspelt, and so are WHP's.
+        if (!header.HasWhpNames && key.Length >= 5 && !key.Any(char.IsAsciiDigit) && NearestName.Of(key, KnownNames.Long) is { } suggestion)
         {
             notes.Add(new Finding(Severity.Warning, "a known column name", $"'{column.Name}', which is near to '{suggestion}'", "It was kept as a further tracer. Rename it if that is what it is, or say so in a match file (--columns).")
             { File = header.File.Name, Line = header.LastLine, Column = column.Name });

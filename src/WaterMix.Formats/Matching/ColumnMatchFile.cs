@@ -2,7 +2,7 @@ namespace WaterMix.Formats.Matching;
 
 /// <summary>A saved column match, <c>watermix/column-match/1</c>: what the columns of a kind of file are, and how its numbers are written.</summary>
 /// <param name="Columns">One entry for each column that the file speaks of; others are guessed as without it.</param>
-public sealed record ColumnMatchFile(IReadOnlyList<ColumnMatch> Columns)
+public sealed partial record ColumnMatchFile(IReadOnlyList<ColumnMatch> Columns)
 {
     /// <summary>The value of the <c>schema</c> key.</summary>
     public const string Schema = "watermix/column-match/1";

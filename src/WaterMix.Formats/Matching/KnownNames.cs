@@ -56,8 +56,9 @@ internal static class KnownNames
     /// <summary>The names under which a file says what its nitrate column holds.</summary>
     public static readonly FrozenSet<string> NitrateKinds = FrozenSet.ToFrozenSet(["nitrate_kind", "nitrate_type"], StringComparer.Ordinal);
 
-    /// <summary>The names that a misspelling may be near to.</summary>
-    public static IEnumerable<string> All => Quantities.Keys.Concat(Quantity.All.Select(q => q.Id)).Concat(Identities.Keys);
+    /// <summary>The names that a misspelling may be near to: ids first, then the others of five letters and more.</summary>
+    public static IReadOnlyList<string> Long { get; } =
+        [.. Quantity.All.Select(q => q.Id).Concat(Quantities.Keys).Concat(Identities.Keys).Where(n => n.Length >= 5).Distinct()];
 
     /// <summary>The identity column of a name: <see cref="IdentityColumn.Ids"/>, <c>date</c>, <c>bottle_flag</c> or <c>bottle</c>; or null.</summary>
     /// <param name="key">A name as <see cref="Key"/> makes it.</param>

@@ -1,20 +1,12 @@
 using System.Globalization;
 using WaterMix.Core.Quantities;
+using WaterMix.Core.Seawater;
 
 namespace WaterMix.Formats.Matching;
 
 /// <summary>The units that are understood, in the spellings met in files, and the way from each to the canonical unit of a quantity.</summary>
 public static class Units
 {
-    /// <summary>IPTS-68 to ITS-90, T90 = T68 / 1.00024, <c>Saunders1990</c>.</summary>
-    public const double T68PerT90 = 1.00024;
-
-    /// <summary>Micromoles of O2 in a millilitre at standard temperature and pressure: 1000 / 22.3916, <c>SCOR</c> WG 142.</summary>
-    public const double MicromolesPerMillilitreOfOxygen = 44.6596;
-
-    /// <summary>Molar mass of O2, g/mol.</summary>
-    public const double OxygenMolarMass = 31.9988;
-
     private static readonly string[] Prefixes = ["", "m", "u", "n", "p", "f"];
 
     /// <summary>The conversion from a unit to the canonical unit of a quantity, or null where the unit is not understood for it.</summary>
@@ -100,9 +92,9 @@ public static class Units
         string plain = text.Replace("-", "", StringComparison.Ordinal);
         if (plain.Contains("68", StringComparison.Ordinal) && quantity != Quantity.ConservativeTemperature)
         {
-            // The misspelling ITS-68 stands in distributed files and can only mean IPTS-68.
+            // T90 = T68 / 1.00024, Saunders1990. The misspelling ITS-68 stands in distributed files and can only mean IPTS-68.
             return plain.Contains("its68", StringComparison.Ordinal) || plain.Contains("ipts68", StringComparison.Ordinal) || plain is "t68" or "degc68" or "c68"
-                ? new UnitConversion(1, T68PerT90, 0, VolumeBasis.None, "T90 = T68 / 1.00024")
+                ? new UnitConversion(1, 1.00024, 0, VolumeBasis.None, "T90 = T68 / 1.00024")
                 : null;
         }
 
@@ -123,12 +115,17 @@ public static class Units
             : "density at the laboratory's temperature in kg/L";
         if (quantity == Quantity.Oxygen && text is ("ml/l" or "mll" or "cm3/l" or "cc/l"))
         {
-            return new UnitConversion(MicromolesPerMillilitreOfOxygen, 1, 0, basis, $"umol/kg = mL/L * 44.6596 / {density}");
+            return Oxygen(ConcentrationUnits.OxygenMicromolesPerMillilitre, "mL/L");
         }
 
         if (quantity == Quantity.Oxygen && text is ("mg/l" or "mgl"))
         {
-            return new UnitConversion(1000, OxygenMolarMass, 0, basis, $"umol/kg = mg/L * 1000 / 31.9988 / {density}");
+            return Oxygen(ConcentrationUnits.OxygenMicromolesPerMilligram, "mg/L");
+        }
+
+        if (quantity == Quantity.Oxygen && text is ("ugat/l" or "ug-at/l" or "uga/l"))
+        {
+            return Oxygen(ConcentrationUnits.OxygenMicromolesPerMicrogramAtom, "ug-at/L");
         }
 
         (string amount, string per) = SplitAmount(text);
@@ -156,6 +153,9 @@ public static class Units
 
         return new UnitConversion(multiply, divide, 0, basis, $"{quantity.Unit} = {amount}/{(per == "l" ? "L" : "m3")}{scale} / {density}");
     }
+
+    private static UnitConversion Oxygen(double micromoles, string unit) =>
+        new(micromoles, 1, 0, VolumeBasis.PotentialDensity, string.Create(CultureInfo.InvariantCulture, $"umol/kg = {unit} * {micromoles} / (1 + sigma0 / 1000)"));
 
     // "umol/kg", "umolkg", "um" (micromolar), "ug-at/l" (microgram-atoms per litre) as amount and what it is per.
     private static (string Amount, string Per) SplitAmount(string text)

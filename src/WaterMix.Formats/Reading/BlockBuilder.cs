@@ -4,8 +4,8 @@ using WaterMix.Formats.Matching;
 
 namespace WaterMix.Formats.Reading;
 
-/// <summary>From a block's originals to its table: bottles that did not trip, densities, and the merging of bottle and CTD values.</summary>
-internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableSchema schema, ColumnTarget[] targets, ReadingOptions options, IWaterDensity density, FindingList findings)
+/// <summary>From a block's originals to its table: bottles that did not trip, litres, and the merging of bottle and CTD values.</summary>
+internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableSchema schema, ColumnTarget[] targets, ReadingOptions options, IPerKilogram perKilogram, FindingList findings)
 {
     private readonly Dictionary<(string Quantity, ValueOrigin Role), ColumnTarget> _targets = targets.ToDictionary(t => (t.Plan.Quantity.Id, t.Plan.Role));
     private long _leaking;
@@ -21,12 +21,12 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
         _leaking += bottles?.LongCount(f => f == QualityFlags.Questionable) ?? 0;
         _mistripped += bottles?.LongCount(f => f == QualityFlags.Bad) ?? 0;
         var columns = new List<SampleColumn>();
-        var densities = new Densities(this, rows, columns);
+        var litres = new LitresPerKilogram(this, rows, columns);
         foreach (SchemaQuantity quantity in schema.Quantities)
         {
-            ColumnTarget? bottle = Original(quantity, ValueOrigin.Bottle, rows, densities);
-            ColumnTarget? ctd = Original(quantity, ValueOrigin.Ctd, rows, densities);
-            ColumnTarget? merged = Original(quantity, ValueOrigin.None, rows, densities);
+            ColumnTarget? bottle = Original(quantity, ValueOrigin.Bottle, rows, litres);
+            ColumnTarget? ctd = Original(quantity, ValueOrigin.Ctd, rows, litres);
+            ColumnTarget? merged = Original(quantity, ValueOrigin.None, rows, litres);
             if (quantity.KeepsOriginals)
             {
                 columns.Add(Merged(quantity, bottle, ctd, merged, bottles, rows));
@@ -64,7 +64,7 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
     }
 
     // The original with the density applied, its arrays cut to the number of rows; null where this file has none.
-    private ColumnTarget? Original(SchemaQuantity quantity, ValueOrigin role, int rows, Densities densities)
+    private ColumnTarget? Original(SchemaQuantity quantity, ValueOrigin role, int rows, LitresPerKilogram litres)
     {
         if (!_targets.TryGetValue((quantity.Quantity.Id, role), out ColumnTarget? target))
         {
@@ -72,7 +72,7 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
         }
 
         target.Buffer.Resize(rows, isNew: false);
-        densities.Apply(target);
+        litres.Apply(target);
         return target;
     }
 
@@ -193,8 +193,8 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
         return flags;
     }
 
-    /// <summary>The densities of a block, each computed when the first column asks for it, from the columns that stand before it.</summary>
-    private sealed class Densities(BlockBuilder builder, int rows, List<SampleColumn> columns)
+    /// <summary>The factors of a block, each computed when the first column asks for it, from the columns that stand before it.</summary>
+    private sealed class LitresPerKilogram(BlockBuilder builder, int rows, List<SampleColumn> columns)
     {
         private double[]? _potential;
         private double[]? _laboratory;
@@ -216,7 +216,7 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
                     continue;
                 }
 
-                values[i] /= Of(basis)[i];
+                values[i] *= Of(basis)[i];
                 if (double.IsNaN(values[i]))
                 {
                     string file = builder.Name;
@@ -231,8 +231,8 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
         }
 
         private double[] Of(VolumeBasis basis) => basis == VolumeBasis.PotentialDensity
-            ? _potential ??= builder.Density.Potential(Table(), builder.Accepted)
-            : _laboratory ??= builder.Density.Laboratory(Table(), builder.Accepted, builder.LaboratoryTemperature);
+            ? _potential ??= builder.PerKilogram.AtPotentialDensity(Table(), builder.Accepted)
+            : _laboratory ??= builder.PerKilogram.InLaboratory(Table(), builder.Accepted, builder.LaboratoryTemperature);
 
         private SampleTable Table() => new(rows, [], [.. columns]);
     }
@@ -241,7 +241,7 @@ internal sealed class BlockBuilder(string file, SourceColumn? bottleFlag, TableS
 
     private FindingList Findings => findings;
 
-    private IWaterDensity Density => density;
+    private IPerKilogram PerKilogram => perKilogram;
 
     private AcceptedFlags Accepted => options.AcceptedFlags;
 

@@ -28,7 +28,7 @@ internal sealed class FileReader
     private bool _sawEnd;
 
     /// <summary>A reader for one file.</summary>
-    public FileReader(FilePlan plan, TableSchema schema, ReadingOptions options, IWaterDensity density, FindingList findings)
+    public FileReader(FilePlan plan, TableSchema schema, ReadingOptions options, IPerKilogram perKilogram, FindingList findings)
     {
         _plan = plan;
         _file = plan.Header.File.Name;
@@ -38,7 +38,7 @@ internal sealed class FileReader
         _decimalMark = (byte)(options.Match is { } match && !plan.Header.IsExchange ? match.DecimalMark : '.');
         _targets = [.. plan.Columns.Select(c => new ColumnTarget(c))];
         _identity = [.. schema.Identity.Select(id => (new NameCodes(id), plan.Identity.GetValueOrDefault(id)))];
-        _builder = new BlockBuilder(_file, plan.BottleFlag, schema, _targets, options, density, findings);
+        _builder = new BlockBuilder(_file, plan.BottleFlag, schema, _targets, options, perKilogram, findings);
         _time = TimeOf;
     }
 

@@ -10,21 +10,21 @@ public sealed class OpenedSamples : IDisposable
     private readonly IReadOnlyList<FilePlan> _plans;
     private readonly TableSchema _schema;
     private readonly ReadingOptions _options;
-    private readonly IWaterDensity _density;
+    private readonly IPerKilogram _perKilogram;
     private readonly FindingList _opening;
     private readonly IDisposable? _inputs;
     private FindingList _reading = new();
     private ImportTally _tally;
 
-    internal OpenedSamples(IReadOnlyList<FilePlan> plans, TableSchema schema, ReadingOptions options, IWaterDensity density, FindingList findings, IDisposable? inputs)
+    internal OpenedSamples(IReadOnlyList<FilePlan> plans, TableSchema schema, ReadingOptions options, IPerKilogram perKilogram, FindingList findings, IDisposable? inputs)
     {
         _plans = plans;
         _schema = schema;
         _options = options;
-        _density = density;
+        _perKilogram = perKilogram;
         _opening = findings;
         _inputs = inputs;
-        Schema = new BlockBuilder("", null, schema, [], options, density, _reading).Build(0, [.. schema.Identity.Select(id => new IdentityColumn(id, [], []))], []);
+        Schema = new BlockBuilder("", null, schema, [], options, perKilogram, _reading).Build(0, [.. schema.Identity.Select(id => new IdentityColumn(id, [], []))], []);
         _tally = new ImportTally(Schema, options.AcceptedFlags);
     }
 
@@ -60,7 +60,7 @@ public sealed class OpenedSamples : IDisposable
         long rows = 0;
         foreach (FilePlan plan in _plans)
         {
-            var file = new FileReader(plan, _schema, _options, _density, _reading);
+            var file = new FileReader(plan, _schema, _options, _perKilogram, _reading);
             foreach (SampleBlock block in file.Blocks(rows, cancellation))
             {
                 _tally.Count(block);

@@ -15,7 +15,7 @@ public static class SampleReader
         ArgumentNullException.ThrowIfNull(options);
         var findings = new FindingList();
         InputFiles inputs = InputFiles.Find(paths, findings);
-        return Open(inputs.Files, options, new SeawaterDensity(), findings, inputs);
+        return Open(inputs.Files, options, new SeawaterPerKilogram(), findings, inputs);
     }
 
     /// <summary>Opens files that stand somewhere else than on a path, such as an upload.</summary>
@@ -25,11 +25,11 @@ public static class SampleReader
     {
         ArgumentNullException.ThrowIfNull(files);
         ArgumentNullException.ThrowIfNull(options);
-        return Open(files, options, new SeawaterDensity(), new FindingList(), null);
+        return Open(files, options, new SeawaterPerKilogram(), new FindingList(), null);
     }
 
     /// <summary>Opens files with a given source of densities.</summary>
-    internal static OpenedSamples Open(IReadOnlyList<InputFile> files, ReadingOptions options, IWaterDensity density, FindingList findings, IDisposable? inputs)
+    internal static OpenedSamples Open(IReadOnlyList<InputFile> files, ReadingOptions options, IPerKilogram perKilogram, FindingList findings, IDisposable? inputs)
     {
         var plans = new List<FilePlan>(files.Count);
         foreach (InputFile file in files)
@@ -46,6 +46,6 @@ public static class SampleReader
             findings.Add(new Finding(Severity.Error, $"the column '{column}' that the match file names", "no such column in any file", "Correct the match file.") { Column = column });
         }
 
-        return new OpenedSamples(plans, TableSchema.Union(plans), options, density, findings, inputs);
+        return new OpenedSamples(plans, TableSchema.Union(plans), options, perKilogram, findings, inputs);
     }
 }

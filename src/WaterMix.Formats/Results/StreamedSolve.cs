@@ -11,14 +11,6 @@ namespace WaterMix.Formats.Results;
 /// <summary>Solves opened samples block by block and writes the results as they come, so that memory does not grow with the input.</summary>
 public static class StreamedSolve
 {
-    /// <summary>The quantities that a model needs from files: what it reads, and what those are derived from.</summary>
-    /// <param name="model">The model.</param>
-    public static IReadOnlySet<string> NeededQuantities(PreparedModel model)
-    {
-        ArgumentNullException.ThrowIfNull(model);
-        return model.QuantityIds.Concat(SampleDerivation.InputsOf(model.QuantityIds)).ToHashSet(StringComparer.Ordinal);
-    }
-
     /// <summary>The tracers that no input has a column for, as errors; to be asked before the rows are read.</summary>
     /// <param name="samples">The opened samples.</param>
     /// <param name="model">The model.</param>
@@ -59,7 +51,7 @@ public static class StreamedSolve
             SolvedBlock solved = MixingSolver.Solve(model, block.Table, options);
             csv.Write(block, solved.Result);
             Count(solved, statuses, usable);
-            Fold(notes, solved.Notes);
+            notes.AddFolded(solved.Notes);
             violation = Math.Max(double.IsNaN(violation) ? 0 : violation, solved.Result.KktViolation?.Where(v => !double.IsNaN(v)).DefaultIfEmpty(0).Max() ?? double.NaN);
             rows += block.Table.RowCount;
             progress?.Report(rows);
@@ -84,23 +76,6 @@ public static class StreamedSolve
         for (int k = 0; k < usable.Length; k++)
         {
             usable[k] += solved.UsableCounts[k];
-        }
-    }
-
-    // The same note of later blocks only adds to the count of the first.
-    private static void Fold(List<Finding> notes, IReadOnlyList<Finding> more)
-    {
-        foreach (Finding note in more)
-        {
-            int same = notes.FindIndex(n => n with { Count = 0 } == note with { Count = 0 });
-            if (same < 0)
-            {
-                notes.Add(note);
-            }
-            else
-            {
-                notes[same] = notes[same] with { Count = notes[same].Count + note.Count };
-            }
         }
     }
 
