@@ -48,7 +48,7 @@ public static class Coastline
         return lands;
     }
 
-    /// <summary>The lands as GeoJSON (RFC 7946): a polygon each, first and last point the same, counterclockwise.</summary>
+    /// <summary>The lands as GeoJSON (<c>Rfc7946</c>): a polygon each, first and last point the same, counterclockwise.</summary>
     /// <param name="noise">The ocean's random numbers.</param>
     public static string GeoJson(Noise noise)
     {

@@ -43,7 +43,7 @@ public sealed class Noise(ulong seed)
         return Fraction(generator.Next());
     }
 
-    /// <summary>Normal with mean 0 and standard deviation 1, Box and Muller (1958).</summary>
+    /// <summary>Normal with mean 0 and standard deviation 1, <c>BoxMuller1958</c>.</summary>
     /// <inheritdoc cref="Uniform"/>
     public double Normal(Purpose purpose, int where, int which, int what)
     {

@@ -2,7 +2,7 @@ namespace WaterMix.SampleData;
 
 /// <summary>
 /// A generator of 64-bit numbers that will give the same sequence for ever: ten lines of our own, since the sequence of
-/// <see cref="Random"/> for a seed may change between versions of .NET. Steele, Lea and Flood (2014), <c>SplitMix64</c>.
+/// <see cref="Random"/> for a seed may change between versions of .NET. <c>SplitMix64</c>.
 /// </summary>
 /// <param name="seed">Any number.</param>
 public struct SplitMix64(ulong seed)
