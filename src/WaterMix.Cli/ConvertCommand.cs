@@ -1,7 +1,6 @@
 using System.CommandLine;
 using WaterMix.Core;
 using WaterMix.Core.Quantities;
-using WaterMix.Core.Samples;
 using WaterMix.Core.Seawater;
 using WaterMix.Formats.Csv;
 using WaterMix.Formats.Reading;

@@ -6,7 +6,6 @@ var root = new RootCommand("Apportions sea water samples into source waters: wat
     SolveCommand.Create(),
     InspectCommand.Create(),
     ConvertCommand.Create(),
-    ConvertSetCommand.Create(),
 };
 
 try

@@ -58,7 +58,7 @@ internal sealed class ReadingArguments
         ColumnMatchFile? match = null;
         if (parse.GetValue(_columns) is { } path)
         {
-            Reading<ColumnMatchFile> reading = ColumnMatchFile.Read(path);
+            Reading<ColumnMatchFile> reading = JsonFile.Read(path, "the column match", (bytes, name) => ColumnMatchFile.Read(bytes, name));
             findings.AddRange(reading.Findings);
             if (reading.Value is null)
             {

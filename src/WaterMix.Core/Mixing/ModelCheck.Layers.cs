@@ -63,7 +63,7 @@ public static partial class ModelCheck
 
     private static void Unknowns(MixingModel model, Layer layer, string at, FindingList findings)
     {
-        int tracers = model.Tracers.Distinct().Count();
+        int tracers = Rows(model).Count();
         int sources = Permitted(model, layer).Count;
         Process[] acting = [.. model.Processes.Where(process => Acts(model, process))];
         int always = sources - 1 + acting.Count(process => process.Where.Count == 0);

@@ -9,13 +9,13 @@ public static partial class ModelCheck
         IReadOnlyList<string> parents = Parents(model);
         var permitted = model.LayersOrAll.SelectMany(layer => Permitted(model, layer)).DistinctBy(p => p.Index).OrderBy(p => p.Index).ToList();
         var lacking = parents.Where(parent => permitted.Count > 0 && !permitted.Exists(p => p.EndMember.Values.ContainsKey(parent))).ToHashSet();
-        foreach ((int i, string tracer) in model.Tracers.Index())
+        foreach ((int i, string tracer) in Rows(model))
         {
             foreach (string parent in model.Fit.Factors.FormOf(tracer).Terms.Select(t => t.Parent).Where(lacking.Contains))
             {
                 findings.Error(
                     JsonPointer.Append("/tracers", i),
-                    parent == tracer ? $"a tracer that the end-members have values of" : $"end-members with values of {parent}, which {tracer} is computed from",
+                    parent == tracer ? "a tracer that the end-members have values of" : $"end-members with values of {parent}, which {tracer} is computed from",
                     $"no value of {parent} in any permitted end-member",
                     $"Give each end-member a value of {parent}, or take {tracer} out.");
             }
@@ -72,11 +72,11 @@ public static partial class ModelCheck
     private static void Twins(MixingModel model, Layer layer, FindingList findings)
     {
         List<(int Index, EndMember EndMember)> permitted = Permitted(model, layer);
-        double[][] values = [.. permitted.Select(p => model.Tracers.Select(t => model.Fit.Factors.ValueOf(t, p.EndMember.Values)).ToArray())];
+        double[][] values = [.. permitted.Select(p => Rows(model).Select(row => model.Fit.Factors.ValueOf(row.Tracer, p.EndMember.Values)).ToArray())];
         for (int j = 1; j < permitted.Count; j++)
         {
             int i = Array.FindIndex(values, 0, j, other => other.SequenceEqual(values[j]) && Array.TrueForAll(other, double.IsFinite));
-            if (i >= 0 && model.Tracers.Count > 0)
+            if (i >= 0 && values[j].Length > 0)
             {
                 findings.Warning(
                     EndMemberPath(permitted[j].Index),
