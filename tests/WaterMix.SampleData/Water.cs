@@ -8,7 +8,7 @@ namespace WaterMix.SampleData;
 /// <param name="Opal">Silicate dissolved since the sources, umol/kg.</param>
 public sealed record Water(double[] Fractions, double Respiration, double Opal)
 {
-    private const double Digit = 1e-4;
+    private const int Parts = 10_000;
 
     /// <summary>
     /// The water at a place. The thermocline water deepens northwards; the intermediate water is a tongue from the south; the marginal
@@ -43,10 +43,10 @@ public sealed record Water(double[] Fractions, double Respiration, double Opal)
     /// <summary>The same to four decimals, the fractions still summing to one: the truth as it can be printed, exactly.</summary>
     public Water Rounded()
     {
-        int[] counts = [.. Fractions.Select(f => (int)Math.Round(f / Digit))];
+        int[] counts = [.. Fractions.Select(f => (int)Math.Round(f * Parts))];
         int largest = Array.IndexOf(counts, counts.Max());
-        counts[largest] += 10_000 - counts.Sum();
-        return new Water([.. counts.Select(c => c / 10_000.0)], Math.Round(Respiration, 4), Math.Round(Opal, 4));
+        counts[largest] += Parts - counts.Sum();
+        return new Water([.. counts.Select(c => c / (double)Parts)], Math.Round(Respiration, 4), Math.Round(Opal, 4));
     }
 
     /// <summary>How far summer and the air have changed the water: 1 down to 30 dbar, 0 below the winter's mixed layer.</summary>
