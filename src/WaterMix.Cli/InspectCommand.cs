@@ -35,7 +35,7 @@ internal static class InspectCommand
             progress.Report(block.FirstRow + block.Table.RowCount - 1);
         }
 
-        Console.Out.Write(samples.Report.ToText());
+        Console.Out.Write(json ? ImportReportJson.Write(samples.Report) : samples.Report.ToText());
         if (save is not null)
         {
             using var output = new OutputFile(save);
