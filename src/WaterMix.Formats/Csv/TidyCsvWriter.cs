@@ -61,8 +61,10 @@ public sealed class TidyCsvWriter : IDisposable
 
         foreach (SampleColumn column in table.Columns)
         {
-            bool isFurther = Quantity.Find(column.Quantity.Id) is null;
-            _csv.WriteField(isFurther && column.Quantity.Unit.Length > 0 ? $"{column.Id} [{column.Quantity.Unit}]" : column.Id);
+            // A further tracer says its unit, once.
+            string unit = $"[{column.Quantity.Unit}]";
+            bool saysUnit = Quantity.Find(column.Quantity.Id) is null && unit.Length > 2 && !column.Id.EndsWith(unit, StringComparison.Ordinal);
+            _csv.WriteField(saysUnit ? $"{column.Id} {unit}" : column.Id);
             if (column.HasFlags)
             {
                 _csv.WriteField(column.Id + "_flag");

@@ -96,23 +96,16 @@ public static class ColumnGuess
         }
 
         string key = KnownNames.Key(name);
-        if (!header.IsExchange)
+        if (KnownNames.FindIdentity(key) is { } identity)
         {
-            if (KnownNames.FindIdentity(key) is { } identity)
-            {
-                return match with { Identity = identity, By = MatchedBy.Name };
-            }
-
-            if (KnownNames.FindQuantity(key) is { } known && Agrees(known.Quantity, column))
-            {
-                string? unit = column.Unit.Length == 0 && known.Unit.Length > 0 ? known.Unit : null;
-                return match with { Quantity = known.Quantity.Id, Origin = known.Origin is { } o ? Explicit(known.Quantity, o) : null, Unit = unit, By = MatchedBy.Name };
-            }
+            return match with { Identity = identity, By = MatchedBy.Name };
         }
 
-        if (header.HasWhpNames && name == "BTLNBR")
+        if (KnownNames.FindQuantity(key) is { } known && Agrees(known.Quantity, column))
         {
-            return match with { Identity = "bottle", By = MatchedBy.WhpName };
+            string? unit = column.Unit.Length == 0 && known.Unit.Length > 0 ? known.Unit : null;
+            ValueOrigin? said = header.Format == SampleFormat.ExchangeCtd && known.Quantity.Use != TracerUse.Never ? ValueOrigin.Ctd : known.Origin;
+            return match with { Quantity = known.Quantity.Id, Origin = said is { } o ? Explicit(known.Quantity, o) : null, Unit = unit, By = MatchedBy.Name };
         }
 
         // Short names and names with digits are near to each other without being misspelt, and so are WHP's.
@@ -187,7 +180,7 @@ public static class ColumnGuess
     {
         string key = KnownNames.Key(column.BaseName);
         Finding finding = KnownNames.NitrateKinds.Contains(key)
-            ? new Finding(Severity.Note, "nitrate", $"'{column.Name}', which says what the nitrate column holds", "Nitrate plus nitrite is used as nitrate.")
+            ? new Finding(Severity.Note, "nitrate", $"'{column.Name}', which says row by row what the nitrate column holds", "Where that is nitrate plus nitrite, it is used as nitrate.")
             : Stem(column, OtherFlagEndings) is not null
                 ? new Finding(Severity.Warning, "WHP flags (_FLAG_W or _flag)", $"flags of another scheme in '{column.Name}'", "They were not used. If they are WHP flags, say so in a match file (--columns, \"flag\").")
                 : new Finding(Severity.Note, "a column to go with every flag, source or scale", $"'{column.Name}' alone", "It was left out.");

@@ -2,9 +2,12 @@ using WaterMix.Core.Samples;
 
 namespace WaterMix.Formats.Matching;
 
-/// <summary>How a match came about.</summary>
+/// <summary>How a match came about, the surest first: of two columns for one quantity the surer is taken.</summary>
 public enum MatchedBy
 {
+    /// <summary>A match file says so.</summary>
+    MatchFile,
+
     /// <summary>The header is the id of a quantity or of an identity column.</summary>
     Id,
 
@@ -13,9 +16,6 @@ public enum MatchedBy
 
     /// <summary>Guessed from a name in use and its unit.</summary>
     Name,
-
-    /// <summary>A match file says so.</summary>
-    MatchFile,
 
     /// <summary>The name says nothing known: kept as a further tracer under its own name.</summary>
     OwnName,

@@ -38,4 +38,15 @@ internal sealed record FilePlan(
     IReadOnlyList<PlannedColumn> Columns,
     IReadOnlyDictionary<string, SourceColumn> Identity,
     SourceColumn? BottleFlag,
-    IReadOnlyList<ColumnMatch> Matches);
+    IReadOnlyList<ColumnMatch> Matches)
+{
+    /// <summary>The columns that nothing is read from.</summary>
+    public IEnumerable<string> LeftOut
+    {
+        get
+        {
+            var read = Matches.Where(m => !m.Ignore).SelectMany(m => m.Columns).ToHashSet(StringComparer.Ordinal);
+            return Header.Columns.Select(c => c.Name).Where(n => !read.Contains(n));
+        }
+    }
+}

@@ -84,17 +84,18 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
         ? match with { Identity = null }
         : match with { Quantity = _byName[match.Column].Name, Origin = null, Source = null, UnitColumn = null, By = MatchedBy.OwnName };
 
-    // Two columns that could be one quantity, neither of them by its very id: an error where the caller needs it, otherwise both keep their own names.
+    // Two columns that could equally be one quantity: an error where the caller needs it, otherwise both keep their own names.
     private List<ColumnMatch> SettleAmbiguity(List<ColumnMatch> matches)
     {
         var settled = new List<ColumnMatch>(matches);
         foreach (IGrouping<(string?, ValueOrigin), ColumnMatch> same in matches.Where(m => m.Quantity is not null && m.By != MatchedBy.OwnName).GroupBy(m => (m.Quantity, Role(m))).Where(g => g.Count() > 1))
         {
             ColumnMatch[] rivals = [.. same];
-            if (rivals.Count(m => m.By == MatchedBy.Id) == 1 && rivals.All(m => m.By != MatchedBy.MatchFile))
+            MatchedBy surest = rivals.Min(m => m.By);
+            if (rivals.Count(m => m.By == surest) == 1)
             {
-                // The id itself is no guess: the others give way.
-                foreach (ColumnMatch other in rivals.Where(m => m.By != MatchedBy.Id))
+                // An id is no guess, and a WHP name hardly one: the others give way.
+                foreach (ColumnMatch other in rivals.Where(m => m.By != surest))
                 {
                     Report(Severity.Warning, _byName[other.Column], $"one column for {other.Quantity}", $"'{other.Column}' beside it", "It was kept as a further tracer. A match file (--columns) can say which it is.");
                     settled[settled.IndexOf(other)] = OwnName(other);
@@ -174,7 +175,7 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
             id = column.Name;
         }
 
-        return Quantity.Further(Taken(id) ? $"{column.Name} (column {column.Index + 1})" : id, unit);
+        return Quantity.Further(Taken(id) ? $"{column.Name}_{column.Index + 1}" : id, unit);
     }
 
     private void NoteUnit(PlannedColumn planned)

@@ -9,6 +9,7 @@ namespace WaterMix.Formats.Reading;
 /// <param name="Files">The files, in reading order.</param>
 /// <param name="Identity">The identity columns present.</param>
 /// <param name="Columns">The quantity columns, in the table's order.</param>
+/// <param name="LeftOut">Header names that were not read.</param>
 /// <param name="BottleFlags">Number of samples by bottle flag; empty where no file has them.</param>
 /// <param name="Findings">Everything found, in order.</param>
 public sealed record ImportReport(
@@ -16,6 +17,7 @@ public sealed record ImportReport(
     IReadOnlyList<ImportedFile> Files,
     IReadOnlyList<string> Identity,
     IReadOnlyList<ImportedColumn> Columns,
+    IReadOnlyList<string> LeftOut,
     IReadOnlyDictionary<int, long> BottleFlags,
     IReadOnlyList<Finding> Findings)
 {
@@ -63,6 +65,11 @@ public sealed record ImportReport(
             }
 
             text.Append(column.Flags.Count > 0 ? $"; flags {Counts(column.Flags)}" : "").Append(column.Conversion.Length > 0 ? $"; {column.Conversion}" : "").Append('\n');
+        }
+
+        if (LeftOut.Count > 0)
+        {
+            text.Append(CultureInfo.InvariantCulture, $"left out: {string.Join(", ", LeftOut)}\n");
         }
 
         foreach (Finding finding in Findings)

@@ -47,6 +47,7 @@ internal sealed class ImportTally(SampleTable columns, AcceptedFlags accepted)
             [.. plans.Select(p => new ImportedFile(p.Header.File.Name, Text(p.Header.Format), _rows.GetValueOrDefault(p.Header.File.Name)))],
             schema.Identity,
             [.. columns.Columns.Select((c, i) => _counts[i].Report(c, Text(byId[c.Quantity.Id].By), _voided.GetValueOrDefault(c.Id)))],
+            [.. plans.SelectMany(p => p.LeftOut).Distinct(StringComparer.Ordinal)],
             Counts(_bottleFlags),
             findings);
     }

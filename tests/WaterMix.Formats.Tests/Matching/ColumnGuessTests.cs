@@ -199,5 +199,23 @@ public class ColumnGuessTests
         Assert.Equal("oxygen", table.Columns[0].Id);
     }
 
+    [Fact]
+    public void Of_WhpName_WinsOverAnotherNameOfTheQuantity()
+    {
+        SampleTable table = ReadingHelp.Table("EXPOCODE,STNNBR,TCARBN [UMOL/KG],TCO2 [UMOL/KG]\nX,1,2100,2101\n");
+
+        Assert.Equal(["dissolved_inorganic_carbon", "TCO2"], table.Columns.Select(c => c.Id));
+        Assert.Equal(2100, table.Columns[0].Values[0]);
+    }
+
+    [Fact]
+    public void Of_OtherNameInAnExchangeFile_IsUnderstoodToo()
+    {
+        SampleTable table = ReadingHelp.Table("CTD,20000101TEST\nNUMBER_HEADERS = 2\nSTNNBR = 1\nCTDPRS,NITRATE,NITRATE_FLAG_W,FLUOR\nDBAR,UMOL/KG,,MG/M3\n10,20,2,0.5\nEND_DATA\n");
+
+        Assert.Equal(["pressure", "nitrate", "FLUOR"], table.Columns.Select(c => c.Id));
+        Assert.All(table.Columns, c => Assert.Equal(ValueOrigin.Ctd, c.OriginAt(0)));
+    }
+
     private static OpenedSamples Open(string csv) => SampleReader.Open([ReadingHelp.File("a.csv", csv)], new ReadingOptions());
 }

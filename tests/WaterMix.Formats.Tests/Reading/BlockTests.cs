@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text;
+using System.Text.Json;
 using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
 using WaterMix.Formats.Matching;
@@ -128,5 +129,25 @@ public class BlockTests
         Assert.Equal((2L, 1L, 1L), (oxygen.Values, oxygen.Usable, oxygen.Flags[4]));
         Assert.Contains("in_situ_temperature [degC] from temp [IPTS-68] (name): 1 values, 1 missing; T90 = T68 / 1.00024", report.ToText(), StringComparison.Ordinal);
         Assert.Equal(MatchedBy.Name, opened.Match.Columns[2].By);
+    }
+
+    [Fact]
+    public void Report_ColumnsThatWereNotRead_AreNamed()
+    {
+        using OpenedSamples opened = SampleReader.Open(
+            [ReadingHelp.File("a.csv", "EXPOCODE,STNNBR,SAMPNO,BTLNBR,OXYGEN,nitrate_kind\nX,1,1,a3,200,NO2+NO3\n")], new ReadingOptions());
+
+        Assert.Equal(["BTLNBR", "nitrate_kind"], ReadingHelp.ReadAll(opened).Report.LeftOut);
+    }
+
+    [Fact]
+    public void Report_AsJson_HasItsParts()
+    {
+        using OpenedSamples opened = SampleReader.Open([ReadingHelp.File("a.csv", "station,oxygen,oxygen_flag\n1,200,2\n")], new ReadingOptions());
+
+        using JsonDocument json = JsonDocument.Parse(JsonSerializer.Serialize(ReadingHelp.ReadAll(opened).Report, JsonSerializerOptions.Web));
+
+        Assert.Equal("csv", json.RootElement.GetProperty("files")[0].GetProperty("format").GetString());
+        Assert.Equal(1, json.RootElement.GetProperty("columns")[0].GetProperty("flags").GetProperty("2").GetInt64());
     }
 }
