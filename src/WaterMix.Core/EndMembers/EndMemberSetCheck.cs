@@ -56,10 +56,13 @@ public static partial class EndMemberSetCheck
         }
     }
 
-    /// <summary>An error where a name is neither a quantity of the contract nor a tracer of the user's with a unit.</summary>
+    /// <summary>True where a name is a quantity of the contract, or a tracer of the user's with a unit.</summary>
+    internal static bool IsKnown(string tracer, EndMemberSet set) => Quantity.Find(tracer) is not null || set.Units.ContainsKey(tracer);
+
+    /// <summary>An error, and false, where a name is neither a quantity of the contract nor a tracer of the user's with a unit.</summary>
     internal static bool IsKnown(string tracer, EndMemberSet set, string at, FindingList findings)
     {
-        if (Quantity.Find(tracer) is not null || set.Units.ContainsKey(tracer))
+        if (IsKnown(tracer, set))
         {
             return true;
         }

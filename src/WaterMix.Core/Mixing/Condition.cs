@@ -23,13 +23,14 @@ public sealed record Condition(string Quantity, double? AtLeast, double? LessTha
 
         if (Quantity == Quantities.Quantity.Longitude.Id && AtLeast is { } start && LessThan is { } end && (start > end || end > 180))
         {
-            double width = end - start;
-            double eastOfStart = value - start;
-            return (eastOfStart < 0 ? eastOfStart + 360 : eastOfStart) < (width < 0 ? width + 360 : width);
+            return end - start >= 360 || EastOf(start, value) < EastOf(start, end);
         }
 
         bool above = AtLeast is not { } low || value >= low;
         bool below = LessThan is not { } high || value < high;
         return above && below;
     }
+
+    // Degrees from one meridian eastwards to another, 0 to below 360.
+    private static double EastOf(double from, double to) => to - from - (360 * Math.Floor((to - from) / 360));
 }

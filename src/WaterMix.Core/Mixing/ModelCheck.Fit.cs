@@ -40,7 +40,11 @@ public static partial class ModelCheck
         {
             for (int i = 0; i < covariance.Tracers.Count; i++)
             {
-                EndMemberSetCheck.IsKnown(covariance.Tracers[i], model.EndMembers, JsonPointer.Append(At + "/tracers", i), findings);
+                string at = JsonPointer.Append(At + "/tracers", i);
+                if (EndMemberSetCheck.IsKnown(covariance.Tracers[i], model.EndMembers, at, findings))
+                {
+                    NoteUnlessFitted(covariance.Tracers[i], parents, at, "a measurement error", findings);
+                }
             }
 
             TracerMatrixCheck.Covariance(covariance, At, findings);
@@ -75,7 +79,7 @@ public static partial class ModelCheck
             }
         }
 
-        foreach (string tracer in model.Tracers.Distinct())
+        foreach ((_, string tracer) in Rows(model))
         {
             if (!fit.Weights.ContainsKey(tracer))
             {
@@ -96,7 +100,7 @@ public static partial class ModelCheck
     private static void Spreads(MixingModel model, WeightedRows fit, Layer layer, FindingList findings)
     {
         EndMember[] over = fit.Over == StandardiseOver.Set ? [.. model.EndMembers.EndMembers] : [.. Permitted(model, layer).Select(p => p.EndMember)];
-        foreach ((int i, string tracer) in model.Tracers.Index().DistinctBy(t => t.Item))
+        foreach ((int i, string tracer) in Rows(model))
         {
             double[] values = [.. over.Select(e => fit.Factors.ValueOf(tracer, e.Values)).Where(double.IsFinite)];
             if (values.Length == 0)

@@ -45,7 +45,7 @@ public static partial class ModelCheck
             findings.Error(at, "at least one end-member", "none", "Name the sources that may be found in this layer.");
         }
 
-        string[] known = [.. model.EndMembers.EndMembers.Select(e => e.Id)];
+        var known = model.EndMembers.EndMembers.Select(e => e.Id).ToHashSet(StringComparer.Ordinal);
         var seen = new HashSet<string>(StringComparer.Ordinal);
         for (int i = 0; i < layer.EndMembers.Count; i++)
         {
@@ -63,7 +63,7 @@ public static partial class ModelCheck
 
     private static void Unknowns(MixingModel model, Layer layer, string at, FindingList findings)
     {
-        int tracers = model.Tracers.Distinct().Count();
+        int tracers = Rows(model).Count();
         int sources = Permitted(model, layer).Count;
         Process[] acting = [.. model.Processes.Where(process => Acts(model, process))];
         int always = sources - 1 + acting.Count(process => process.Where.Count == 0);

@@ -50,7 +50,7 @@ public static partial class ModelCheck
             }
         }
 
-        if (sound && model.Tracers.Count > 0 && !Acts(model, process))
+        if (sound && parents.Count > 0 && !Acts(model, process))
         {
             findings.Warning(
                 at,
@@ -61,9 +61,9 @@ public static partial class ModelCheck
     }
 
     // True where the process changes a fitted tracer. Ratios of derived tracers follow from those of their parents, without the offset.
-    private static bool Acts(MixingModel model, Process process) => model.Tracers.Any(tracer =>
+    private static bool Acts(MixingModel model, Process process) => Rows(model).Any(row =>
     {
-        double[] changes = [.. model.Fit.Factors.FormOf(tracer).Terms.Select(t => t.Factor * process.Ratios.GetValueOrDefault(t.Parent))];
+        double[] changes = [.. model.Fit.Factors.FormOf(row.Tracer).Terms.Select(t => t.Factor * process.Ratios.GetValueOrDefault(t.Parent))];
         return Math.Abs(changes.Sum()) > 1e-12 * changes.Max(Math.Abs);
     });
 }

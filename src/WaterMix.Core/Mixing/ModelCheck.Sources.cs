@@ -9,13 +9,13 @@ public static partial class ModelCheck
         IReadOnlyList<string> parents = Parents(model);
         var permitted = model.LayersOrAll.SelectMany(layer => Permitted(model, layer)).DistinctBy(p => p.Index).OrderBy(p => p.Index).ToList();
         var lacking = parents.Where(parent => permitted.Count > 0 && !permitted.Exists(p => p.EndMember.Values.ContainsKey(parent))).ToHashSet();
-        foreach ((int i, string tracer) in model.Tracers.Index())
+        foreach ((int i, string tracer) in Rows(model))
         {
             foreach (string parent in model.Fit.Factors.FormOf(tracer).Terms.Select(t => t.Parent).Where(lacking.Contains))
             {
                 findings.Error(
                     JsonPointer.Append("/tracers", i),
-                    parent == tracer ? $"a tracer that the end-members have values of" : $"end-members with values of {parent}, which {tracer} is computed from",
+                    parent == tracer ? "a tracer that the end-members have values of" : $"end-members with values of {parent}, which {tracer} is computed from",
                     $"no value of {parent} in any permitted end-member",
                     $"Give each end-member a value of {parent}, or take {tracer} out.");
             }
@@ -72,11 +72,14 @@ public static partial class ModelCheck
     private static void Twins(MixingModel model, Layer layer, FindingList findings)
     {
         List<(int Index, EndMember EndMember)> permitted = Permitted(model, layer);
-        double[][] values = [.. permitted.Select(p => model.Tracers.Select(t => model.Fit.Factors.ValueOf(t, p.EndMember.Values)).ToArray())];
-        for (int j = 1; j < permitted.Count; j++)
+        string[] rows = [.. Rows(model).Select(row => row.Tracer)];
+        var firstWith = new Dictionary<string, int>(StringComparer.Ordinal);
+        for (int j = 0; j < permitted.Count; j++)
         {
-            int i = Array.FindIndex(values, 0, j, other => other.SequenceEqual(values[j]) && Array.TrueForAll(other, double.IsFinite));
-            if (i >= 0 && model.Tracers.Count > 0)
+            double[] values = [.. rows.Select(tracer => model.Fit.Factors.ValueOf(tracer, permitted[j].EndMember.Values))];
+            string key = string.Join(' ', values.Select(Text));
+            bool isComplete = values.Length > 0 && Array.TrueForAll(values, double.IsFinite);
+            if (isComplete && !firstWith.TryAdd(key, j) && firstWith[key] is var i)
             {
                 findings.Warning(
                     EndMemberPath(permitted[j].Index),

@@ -100,7 +100,7 @@ public static partial class ModelCheck
     {
         IReadOnlyList<string> parents = Parents(model);
         var basis = new List<double[]>();
-        foreach ((int i, string tracer) in model.Tracers.Index().DistinctBy(t => t.Item))
+        foreach ((int i, string tracer) in Rows(model))
         {
             double[] form = new double[parents.Count];
             foreach ((string parent, double factor) in model.Fit.Factors.FormOf(tracer).Terms)

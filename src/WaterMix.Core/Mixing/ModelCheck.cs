@@ -1,5 +1,6 @@
 using System.Globalization;
 using WaterMix.Core.EndMembers;
+using WaterMix.Core.Quantities;
 
 namespace WaterMix.Core.Mixing;
 
@@ -29,13 +30,21 @@ public static partial class ModelCheck
         return [.. EndMemberSetCheck.Findings(model.EndMembers, EndMembersPath), .. findings.Items];
     }
 
+    /// <summary>The tracers that may be rows, each once, with their index in the model. A refused one is not asked for values and errors as well.</summary>
+    private static IEnumerable<(int Index, string Tracer)> Rows(MixingModel model) => model.Tracers.Index()
+        .Where(t => EndMemberSetCheck.IsKnown(t.Item, model.EndMembers) && Quantity.FindOrFurther(t.Item).Use != TracerUse.Never)
+        .DistinctBy(t => t.Item);
+
     /// <summary>The quantities that the tracers are computed from, each once: what end-members and errors must be given for.</summary>
     private static IReadOnlyList<string> Parents(MixingModel model) =>
-        [.. model.Tracers.SelectMany(tracer => model.Fit.Factors.FormOf(tracer).Terms).Select(term => term.Parent).Distinct()];
+        [.. Rows(model).Select(row => row.Tracer).SelectMany(tracer => model.Fit.Factors.FormOf(tracer).Terms).Select(term => term.Parent).Distinct()];
 
     /// <summary>The end-members that a layer permits, with their index in the set; ids that are not in the set are passed over.</summary>
-    private static List<(int Index, EndMember EndMember)> Permitted(MixingModel model, Layer layer) =>
-        [.. model.EndMembers.EndMembers.Index().Where(e => layer.EndMembers.Contains(e.Item.Id))];
+    private static List<(int Index, EndMember EndMember)> Permitted(MixingModel model, Layer layer)
+    {
+        var ids = layer.EndMembers.ToHashSet(StringComparer.Ordinal);
+        return [.. model.EndMembers.EndMembers.Index().Where(e => ids.Contains(e.Item.Id))];
+    }
 
     private static string EndMemberPath(int index, params ReadOnlySpan<string> tokens)
     {

@@ -2,7 +2,7 @@ using WaterMix.Core.EndMembers;
 
 namespace WaterMix.Core.Mixing;
 
-/// <summary>A biogeochemical column of the fit; its amount is solved with the fractions.</summary>
+/// <summary>A biogeochemical column of the fit; its amount is solved with the fractions, <c>KarstensenTomczak1998</c>.</summary>
 /// <param name="Id">As an end-member's id, unique together with those.</param>
 /// <param name="Per">The quantity id that the amount counts; its own ratio is 1. Need not be a tracer of the fit.</param>
 /// <param name="Ratios">Change seen in the sample per 1 of <paramref name="Per"/>, by quantity id.</param>

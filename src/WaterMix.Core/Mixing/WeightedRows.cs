@@ -2,7 +2,7 @@ using WaterMix.Core.EndMembers;
 
 namespace WaterMix.Core.Mixing;
 
-/// <summary>The published row-weighting recipes: standardise over the end-members, weigh, minimise the sum of squared rows.</summary>
+/// <summary>The published row-weighting recipes (<c>TomczakLarge1989</c>): standardise over the end-members, weigh, minimise the sum of squared rows.</summary>
 /// <param name="Weights">Weight by tracer id, each > 0.</param>
 public sealed record WeightedRows(IReadOnlyDictionary<string, double> Weights) : Fit
 {

@@ -147,7 +147,7 @@ public sealed record Quantity(string Id, string Unit, string Name, TracerUse Use
     /// <param name="id">The user's name for it.</param>
     /// <param name="unit">The unit as given; empty where none is known.</param>
     public static Quantity Further(string id, string unit) =>
-        new(id, unit, id, TracerUse.Row, double.NegativeInfinity, double.PositiveInfinity);
+        new(id, unit, id, TracerUse.Row, double.MinValue, double.MaxValue);
 
     /// <summary>The quantity with this id, or a further tracer of that name without a unit.</summary>
     /// <param name="id">An id of the contract or the user's own.</param>
@@ -166,5 +166,5 @@ public sealed record Quantity(string Id, string Unit, string Name, TracerUse Use
     private static Quantity Density(string id, string name) => new(id, "kg/m3", name, TracerUse.Never, -50, 100);
 
     private static Quantity Derived(string id, string name) =>
-        new(id, "umol/kg", name, TracerUse.DerivedRow, double.NegativeInfinity, double.PositiveInfinity);
+        new(id, "umol/kg", name, TracerUse.DerivedRow, double.MinValue, double.MaxValue);
 }

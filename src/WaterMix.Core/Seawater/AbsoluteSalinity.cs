@@ -11,7 +11,7 @@ public static class AbsoluteSalinity
     /// <param name="longitudeDeg">Longitude, degrees east, -180 to 360.</param>
     /// <param name="latitudeDeg">Latitude, degrees north, -86 to 90; the atlas has nothing further south.</param>
     /// <returns>Absolute Salinity, g/kg. NaN where an input is NaN or the position is outside the range.</returns>
-    /// <remarks><c>McDougall2012</c>, <c>IOC2010</c>, appendix A.5.</remarks>
+    /// <remarks><c>McDougall2012</c>, <c>IOC2010</c>, appendix A.5. 0 p makes a missing pressure count in the Baltic as it does elsewhere.</remarks>
     public static double FromPractical(double practicalSalinity, double pressureDbar, double longitudeDeg, double latitudeDeg) =>
         BalticSea.Contains(longitudeDeg, latitudeDeg)
             ? (BalticSea.GramsPerPracticalSalinity * practicalSalinity) + BalticSea.RiverSalt + (0 * pressureDbar)

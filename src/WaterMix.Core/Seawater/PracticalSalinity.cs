@@ -9,7 +9,7 @@ public static class PracticalSalinity
     /// <param name="longitudeDeg">Longitude, degrees east, -180 to 360.</param>
     /// <param name="latitudeDeg">Latitude, degrees north, -86 to 90.</param>
     /// <returns>Practical Salinity. NaN where an input is NaN or the position is outside the range.</returns>
-    /// <remarks><c>McDougall2012</c>, <c>IOC2010</c>, appendix A.5.</remarks>
+    /// <remarks><c>McDougall2012</c>, <c>IOC2010</c>, appendix A.5. 0 p makes a missing pressure count in the Baltic as it does elsewhere.</remarks>
     public static double FromAbsolute(double absoluteSalinity, double pressureDbar, double longitudeDeg, double latitudeDeg) =>
         BalticSea.Contains(longitudeDeg, latitudeDeg)
             ? ((absoluteSalinity - BalticSea.RiverSalt) / BalticSea.GramsPerPracticalSalinity) + (0 * pressureDbar)

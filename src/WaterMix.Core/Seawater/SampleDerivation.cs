@@ -36,6 +36,18 @@ public static class SampleDerivation
         return new DerivedSamples(columns.Length == 0 ? table : table.With(columns), [.. derivation.Notes, .. lacking]);
     }
 
+    /// <summary>True where a quantity can be derived from others.</summary>
+    /// <param name="id">A quantity id.</param>
+    public static bool CanDerive(string id) => Needs.ContainsKey(id);
+
+    /// <summary>These quantities, and the measured ones that those which can be derived are computed from in the first place.</summary>
+    /// <param name="ids">Quantity ids.</param>
+    public static IReadOnlySet<string> InputsOf(IReadOnlyList<string> ids)
+    {
+        ArgumentNullException.ThrowIfNull(ids);
+        return ids.Concat(ids.SelectMany(id => Needs.GetValueOrDefault(id, [])).Select(q => q.Id)).ToHashSet(StringComparer.Ordinal);
+    }
+
     /// <summary>
     /// A potential density anomaly of EOS-80, for thresholds published in it. It has the id of TEOS-10's with the suffix <c>_eos80</c>.
     /// </summary>

@@ -1,3 +1,5 @@
+using System.Globalization;
+using System.Text.Json;
 using WaterMix.Core;
 
 namespace WaterMix.Formats.Json;
@@ -47,7 +49,11 @@ public sealed class StrictJsonDocument
         StrictJsonNode? at = Root;
         while (at is not null && at.Path.Length < path.Length)
         {
-            StrictJsonNode? inner = at.Children.FirstOrDefault(child => JsonPointer.IsWithin(path, child.Path));
+            int end = path.IndexOf('/', at.Path.Length + 1);
+            string next = end < 0 ? path : path[..end];
+            StrictJsonNode? inner = at.Kind == JsonValueKind.Array
+                ? int.TryParse(next.AsSpan(at.Path.Length + 1), NumberStyles.None, CultureInfo.InvariantCulture, out int index) ? at.Children.ElementAtOrDefault(index) : null
+                : at.Children.FirstOrDefault(child => child.Path == next);
             if (inner is null)
             {
                 break;

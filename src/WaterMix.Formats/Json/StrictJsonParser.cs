@@ -110,7 +110,7 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
         });
         try
         {
-            Next(ref reader, "");
+            Next(ref reader);
             StrictJsonNode root = Value(ref reader, "", "");
             while (reader.Read())
             {
@@ -156,10 +156,10 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
     {
         var children = new List<StrictJsonNode>();
         var firstLine = new Dictionary<string, int>(StringComparer.Ordinal);
-        while (Next(ref reader, path) && reader.TokenType != JsonTokenType.EndObject)
+        while (Next(ref reader) && reader.TokenType != JsonTokenType.EndObject)
         {
             int offset = Offset(ref reader);
-            string key = Text(ref reader, path) ?? "";
+            string key = Text(ref reader, path: null) ?? "";
             string childPath = JsonPointer.Append(path, key);
             bool isNew = firstLine.TryAdd(key, LineOf(offset));
             if (!isNew)
@@ -167,7 +167,7 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
                 Found(offset, "each key once", $"\"{key}\" a second time (first in line {firstLine[key]})", "Keep one of the two.", childPath);
             }
 
-            Next(ref reader, childPath);
+            Next(ref reader);
             StrictJsonNode child = Value(ref reader, childPath, key);
             if (isNew)
             {
@@ -181,7 +181,7 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
     private List<StrictJsonNode> Items(ref Utf8JsonReader reader, string path)
     {
         var children = new List<StrictJsonNode>();
-        while (Next(ref reader, path) && reader.TokenType != JsonTokenType.EndArray)
+        while (Next(ref reader) && reader.TokenType != JsonTokenType.EndArray)
         {
             string index = children.Count.ToString(CultureInfo.InvariantCulture);
             children.Add(Value(ref reader, JsonPointer.Append(path, index), index));
@@ -191,7 +191,7 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
     }
 
     // Advances to the next token that is no comment; a comma just before a closing bracket is reported.
-    private bool Next(ref Utf8JsonReader reader, string path)
+    private bool Next(ref Utf8JsonReader reader)
     {
         int comma = -1;
         while (true)
@@ -209,7 +209,7 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
             {
                 if (comma >= 0 && reader.TokenType is (JsonTokenType.EndObject or JsonTokenType.EndArray))
                 {
-                    Found(comma, "a value after the comma", "a closing bracket", "Take out the comma after the last value.", path);
+                    Found(comma, "a value after the comma", "a closing bracket", "Take out the comma after the last value.", path: null);
                 }
 
                 return true;
@@ -228,7 +228,7 @@ internal sealed class StrictJsonParser(byte[] bytes, StrictJsonDocument document
         return false;
     }
 
-    private string? Text(ref Utf8JsonReader reader, string path)
+    private string? Text(ref Utf8JsonReader reader, string? path)
     {
         try
         {

@@ -28,18 +28,9 @@ public static class MixingModelFile
     public static Reading<MixingModel> Read(string path)
     {
         ArgumentNullException.ThrowIfNull(path);
-        byte[] utf8;
-        try
-        {
-            utf8 = File.ReadAllBytes(path);
-        }
-        catch (Exception fault) when (IsUnreadable(fault))
-        {
-            return new Reading<MixingModel>(null, [Unreadable(fault, "the mixing model") with { File = path }]);
-        }
-
         string folder = Path.GetDirectoryName(path) ?? "";
-        return Read(utf8, path, name => (File.ReadAllBytes(Path.Combine(folder, name)), Path.Combine(folder, name)));
+        return JsonFile.Read(path, "the mixing model", (utf8, name) =>
+            Read(utf8, name, set => (File.ReadAllBytes(Path.Combine(folder, set)), Path.Combine(folder, set))));
     }
 
     /// <summary>Reads a model.</summary>
@@ -113,9 +104,9 @@ public static class MixingModelFile
         {
             opened = openSet(file);
         }
-        catch (Exception fault) when (IsUnreadable(fault))
+        catch (Exception fault) when (JsonFile.IsUnreadable(fault))
         {
-            Finding finding = Unreadable(fault, "the end-member set");
+            Finding finding = JsonFile.Unreadable(fault, "the end-member set");
             fileNode.Report(finding.Expected, finding.Found, finding.Remedy);
             return default;
         }
@@ -123,9 +114,4 @@ public static class MixingModelFile
         document = StrictJsonDocument.Parse(opened.Utf8, opened.FileName);
         return (document.Root is null ? null : EndMemberSetReader.Read(document.Root, needsSchema: true), file);
     }
-
-    private static bool IsUnreadable(Exception fault) => fault is IOException or UnauthorizedAccessException or ArgumentException;
-
-    private static Finding Unreadable(Exception fault, string what) =>
-        new(Severity.Error, $"{what} as a file that can be read", fault.Message.TrimEnd('.'), "Check the name and the folder, and that you may read the file.");
 }

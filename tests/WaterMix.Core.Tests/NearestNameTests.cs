@@ -1,4 +1,4 @@
-namespace WaterMix.Core.Tests.EndMembers;
+namespace WaterMix.Core.Tests;
 
 public class NearestNameTests
 {
