@@ -24,6 +24,25 @@ public class ConvertCommandTests
         Assert.Equal(original.Output, tidy.Output);
     }
 
+    // The tidy table keeps both originals, so the preference and the accepted flags act on it as on the file it came from.
+    [Fact]
+    public void Convert_ThenSolvePreferringTheCtd_GivesTheSameResults()
+    {
+        using var scratch = new Scratch();
+        string text = File.ReadAllText(Path.Combine(Data, "halcyon.mixmodel.json"));
+        File.Copy(Path.Combine(Data, "halcyon.endmembers.json"), scratch.Path("halcyon.endmembers.json"));
+        string model = scratch.Write("ctd.mixmodel.json", text.Insert(text.IndexOf('{', StringComparison.Ordinal) + 1, " \"samples\": { \"prefer\": \"ctd\" },"));
+        CommandRun.Of("convert", Cruise, "--out", scratch.Path("tidy.csv"));
+
+        CommandRun bottle = CommandRun.Of("solve", scratch.Path("tidy.csv"), "--model", Path.Combine(Data, "halcyon.mixmodel.json"));
+        CommandRun original = CommandRun.Of("solve", Cruise, "--model", model);
+        CommandRun tidy = CommandRun.Of("solve", scratch.Path("tidy.csv"), "--model", model);
+
+        Assert.Equal(0, original.ExitCode + tidy.ExitCode);
+        Assert.Equal(original.Output, tidy.Output);
+        Assert.NotEqual(bottle.Output, tidy.Output);
+    }
+
     [Fact]
     public void Convert_WithDerived_AddsColumns()
     {

@@ -42,8 +42,13 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
             return null;
         }
 
+        columns.RemoveAll(merged => merged.Role == ValueOrigin.None && HasOriginals(columns, merged.Quantity));
         return new FilePlan(header, columns, identity, bottleFlag, matches);
     }
+
+    // A tidy table holds the merged column and both originals: merging those anew lets the options act as they do on any other file.
+    private static bool HasOriginals(List<PlannedColumn> columns, Quantity quantity) =>
+        columns.Any(c => c.Quantity == quantity && c.Role == ValueOrigin.Bottle) && columns.Any(c => c.Quantity == quantity && c.Role == ValueOrigin.Ctd);
 
     private static ValueOrigin Role(ColumnMatch match) =>
         match.Source is not null ? ValueOrigin.None : match.Origin ?? Origins.Usual(Quantity.FindOrFurther(match.Quantity!));
