@@ -1,8 +1,13 @@
+using WaterMix.Core.EndMembers;
+
 namespace WaterMix.Core.Mixing;
 
 /// <summary>The factors of the derived tracers.</summary>
 public sealed record DerivedTracerFactors
 {
+    // A sum no larger than this share of its terms is rounding: the terms cancel.
+    private const double Cancelled = 1e-12;
+
     /// <summary>NO = O2 + this * NO3. Default 170/16, <c>AndersonSarmiento1994</c>.</summary>
     public double NoOxygenPerNitrate { get; init; } = 170.0 / 16.0;
 
@@ -44,5 +49,41 @@ public sealed record DerivedTracerFactors
         ArgumentNullException.ThrowIfNull(values);
         (IReadOnlyList<(string Parent, double Factor)> terms, double offset) = FormOf(tracer);
         return terms.Sum(term => term.Factor * values.GetValueOrDefault(term.Parent, double.NaN)) + offset;
+    }
+
+    /// <summary>
+    /// The change of a tracer by a process, from the ratios of its parent quantities. What cancels to within rounding is 0: respiration in
+    /// the ratios that PO is defined with does not change PO.
+    /// </summary>
+    /// <param name="tracer">A tracer's id.</param>
+    /// <param name="ratios">Change by quantity id; a quantity without one does not change.</param>
+    public double ChangeOf(string tracer, IReadOnlyDictionary<string, double> ratios)
+    {
+        ArgumentNullException.ThrowIfNull(ratios);
+        double[] changes = [.. FormOf(tracer).Terms.Select(term => term.Factor * ratios.GetValueOrDefault(term.Parent))];
+        double sum = changes.Sum();
+        return Math.Abs(sum) <= Cancelled * changes.Max(Math.Abs) ? 0 : sum;
+    }
+
+    /// <summary>Mean and standard deviation of a tracer over end-members; those that lack it do not count. A deviation within rounding is 0.</summary>
+    /// <param name="tracer">A tracer's id.</param>
+    /// <param name="endMembers">The end-members.</param>
+    /// <param name="divisor">What the sum of squares is divided by.</param>
+    /// <returns>NaN for both where no end-member has the tracer.</returns>
+    public (double Mean, double Sd) SpreadOf(string tracer, IEnumerable<EndMember> endMembers, SdDivisor divisor)
+    {
+        ArgumentNullException.ThrowIfNull(endMembers);
+        EndMember[] having = [.. endMembers.Where(e => FormOf(tracer).Terms.All(term => e.Values.ContainsKey(term.Parent)))];
+        if (having.Length == 0)
+        {
+            return (double.NaN, double.NaN);
+        }
+
+        double[] values = [.. having.Select(e => ValueOf(tracer, e.Values))];
+        double mean = values.Average();
+        double squares = values.Sum(v => (v - mean) * (v - mean));
+        double sd = values.Length == 1 ? 0 : Math.Sqrt(squares / (divisor == SdDivisor.N ? values.Length : values.Length - 1));
+        double largest = having.Max(e => FormOf(tracer).Terms.Max(term => Math.Abs(term.Factor * e.Values[term.Parent])));
+        return (mean, sd <= Cancelled * largest ? 0 : sd);
     }
 }

@@ -102,18 +102,15 @@ public static partial class ModelCheck
         EndMember[] over = fit.Over == StandardiseOver.Set ? [.. model.EndMembers.EndMembers] : [.. Permitted(model, layer).Select(p => p.EndMember)];
         foreach ((int i, string tracer) in Rows(model))
         {
-            double[] values = [.. over.Select(e => fit.Factors.ValueOf(tracer, e.Values)).Where(double.IsFinite)];
-            if (values.Length == 0)
+            (_, double sd) = fit.Factors.SpreadOf(tracer, over, fit.SdOver);
+            if (double.IsNaN(sd))
             {
                 continue;
             }
 
-            double mean = values.Average();
-            double sumOfSquares = values.Sum(v => (v - mean) * (v - mean));
-            double sd = values.Length == 1 ? 0 : Math.Sqrt(sumOfSquares / (fit.SdOver == SdDivisor.N ? values.Length : values.Length - 1));
             string where = fit.Over == StandardiseOver.Set ? "over the set" : $"in layer \"{layer.Id}\"";
             string at = JsonPointer.Append("/tracers", i);
-            if (sd <= 1e-12 * Math.Abs(mean))
+            if (sd == 0)
             {
                 findings.Warning(at, "end-members that differ in each tracer", $"no difference in {tracer} {where}", $"{tracer} is left out of layer \"{layer.Id}\"; check the values.");
             }

@@ -61,9 +61,6 @@ public static partial class ModelCheck
     }
 
     // True where the process changes a fitted tracer. Ratios of derived tracers follow from those of their parents, without the offset.
-    private static bool Acts(MixingModel model, Process process) => Rows(model).Any(row =>
-    {
-        double[] changes = [.. model.Fit.Factors.FormOf(row.Tracer).Terms.Select(t => t.Factor * process.Ratios.GetValueOrDefault(t.Parent))];
-        return Math.Abs(changes.Sum()) > 1e-12 * changes.Max(Math.Abs);
-    });
+    private static bool Acts(MixingModel model, Process process) =>
+        Rows(model).Any(row => model.Fit.Factors.ChangeOf(row.Tracer, process.Ratios) != 0);
 }

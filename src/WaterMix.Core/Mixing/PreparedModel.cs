@@ -13,7 +13,7 @@ public sealed class PreparedModel
         Model = model;
         Transform = transform;
         Accepted = new AcceptedFlags(model.AcceptFlags, model.AcceptCtdFlags);
-        ProcessColumns = [.. model.Processes.Select(process => TracerRatios(process, transform))];
+        ProcessColumns = [.. model.Processes.Select(process => model.Tracers.Select(t => model.Fit.Factors.ChangeOf(t, process.Ratios)).ToArray())];
         TracerMatrix? covariance = (model.Fit as GeneralisedLeastSquares)?.MeasurementCovariance;
         (MeasurementCovariance, HasMeasurementError) = Measurement(model.Fit, covariance, transform);
         RelativeErrors = [.. transform.Parents.Select(p =>
@@ -87,10 +87,8 @@ public sealed class PreparedModel
         IReadOnlyList<EndMember> set = Model.EndMembers.EndMembers;
         int[] permitted = [.. Enumerable.Range(0, set.Count).Where(i => layer.EndMembers.Contains(set[i].Id))];
         double[][] values = [.. permitted.Select(i => TracerValues(set[i]))];
-        double[][] over = Model.Fit is WeightedRows { Over: StandardiseOver.Set }
-            ? [.. set.Where(HasAllTracers).Select(TracerValues)]
-            : values;
-        (double[] factors, double[] means) = Weighing(over);
+        bool overSet = Model.Fit is WeightedRows { Over: StandardiseOver.Set };
+        (double[] factors, double[] means) = Weighing(overSet ? set : [.. permitted.Select(i => set[i])]);
         return new PreparedLayer
         {
             Id = layer.Id,
@@ -103,7 +101,7 @@ public sealed class PreparedModel
         };
     }
 
-    private (double[] Factors, double[] Means) Weighing(double[][] values)
+    private (double[] Factors, double[] Means) Weighing(IReadOnlyList<EndMember> over)
     {
         if (Model.Fit is not WeightedRows fit)
         {
@@ -123,19 +121,13 @@ public sealed class PreparedModel
                 continue;
             }
 
-            double mean = values.Sum(v => v[t]) / values.Length;
-            double squares = values.Sum(v => (v[t] - mean) * (v[t] - mean));
-            double divisor = fit.SdOver == SdDivisor.N ? values.Length : values.Length - 1;
-            double sd = divisor > 0 ? Math.Sqrt(squares / divisor) : 0;
-            bool constant = values.All(v => v[t] == values[0][t]);
-            factors[t] = constant || sd == 0 ? 0 : factor / sd;
+            (double mean, double sd) = fit.Factors.SpreadOf(Model.Tracers[t], over, fit.SdOver);
+            factors[t] = sd == 0 ? 0 : factor / sd;
             means[t] = fit.Standardise == Standardisation.MeanAndSd ? mean : 0;
         }
 
         return (factors, means);
     }
-
-    private bool HasAllTracers(EndMember member) => Transform.Parents.All(member.Values.ContainsKey);
 
     private double[] TracerValues(EndMember member)
     {
@@ -179,12 +171,6 @@ public sealed class PreparedModel
         int row = matrix.Tracers.ToList().IndexOf(a);
         int column = matrix.Tracers.ToList().IndexOf(b);
         return row < 0 || column < 0 ? null : matrix.Matrix[row][column];
-    }
-
-    private static double[] TracerRatios(Process process, TracerTransform transform)
-    {
-        double[] parents = [.. transform.Parents.Select(p => process.Ratios.GetValueOrDefault(p))];
-        return [.. Enumerable.Range(0, transform.Tracers.Count).Select(t => transform.Value(t, parents) - transform.Constants[t])];
     }
 
     private static (double[] Covariance, bool[] Known) Measurement(Fit fit, TracerMatrix? given, TracerTransform transform)

@@ -6,9 +6,11 @@ namespace WaterMix.Core.Mixing.Kernels;
 /// <remarks>
 /// <para><c>LawsonHanson1974</c>, chapter 23 (NNLS), generalised to a sum condition and to unknowns without a bound.</para>
 /// <para>
-/// The passive set P holds the unknowns that are not at their bound. With exact mass conservation the largest fraction in P is the reference r,
-/// x_r = 1 - sum of the others, and the columns become a_j - a_r: the least-squares problem on P has no condition left, and no normal
-/// equations are formed. A feasible point moves towards that solution until a bound stops it; then the bounded unknown with the steepest gradient enters.
+/// The passive set P holds the unknowns that are not at their bound. The largest fraction in P is the reference r, x_r = 1 + e - sum of the others,
+/// where e is the excess of the sum over one: zero with exact mass conservation, otherwise an unknown with the column a_r. The other fractions' columns
+/// become a_j - a_r. So with exact mass the least-squares problem on P has no condition left, and with a mass row, however heavy, that row is in one column
+/// only and drowns nothing. No normal equations are formed. A feasible point moves towards that solution until a bound stops it; then the bounded unknown with the
+/// steepest gradient enters.
 /// </para>
 /// <para>
 /// Why it ends: each change of P that is kept lowers the computed misfit, which depends on P alone, so no P is visited twice. An entry that
@@ -29,6 +31,8 @@ public sealed class ActiveSetKernel : IMixingKernel
     private double[] _coefficients = [];
     private double[] _residual = [];
     private double[] _gap = [];
+    private double _excess;
+    private double _targetExcess;
 
     /// <inheritdoc/>
     public void Solve(MixingSystem system, ReadOnlySpan<double> rightHandSides, Span<double> solutions, Span<KernelOutcome> outcomes)
@@ -74,6 +78,7 @@ public sealed class ActiveSetKernel : IMixingKernel
 
             x.CopyTo(_saved);
             _passive.CopyTo(_savedPassive.AsSpan());
+            double savedExcess = _excess;
             _passive[entering] = true;
             LeastSquaresOnPassiveSet(system, b, x);
             bool lower = false;
@@ -93,6 +98,7 @@ public sealed class ActiveSetKernel : IMixingKernel
             {
                 _saved.AsSpan(0, unknowns).CopyTo(x);
                 _savedPassive.CopyTo(_passive.AsSpan());
+                _excess = savedExcess;
                 _blocked[entering] = true;
                 Residual(system, b, x);
             }
@@ -101,43 +107,40 @@ public sealed class ActiveSetKernel : IMixingKernel
         return KernelOutcome.IterationLimit;
     }
 
-    // The unconstrained minimum with the unknowns outside P at zero, into _target.
+    // The unconstrained minimum with the unknowns outside P at zero, into _target and _targetExcess.
     private void LeastSquaresOnPassiveSet(MixingSystem system, ReadOnlySpan<double> b, ReadOnlySpan<double> x)
     {
         int unknowns = system.Unknowns;
-        int reference = system.ExactMass ? Reference(system, x) : -1;
-        int count = 0;
+        int reference = Reference(system, x);
+        bool hasExcess = reference >= 0 && !system.ExactMass;
+        int count = hasExcess ? 1 : 0;
         for (int j = 0; j < unknowns; j++)
         {
             count += _passive[j] && j != reference ? 1 : 0;
         }
 
         _qr.Reshape(system.Rows, count);
-        b.CopyTo(_qr.RightHandSide);
-        if (reference >= 0)
-        {
-            Vectors.AddScaled(-1, system.Column(reference), _qr.RightHandSide);
-        }
-
+        FromReference(system, b, reference, _qr.RightHandSide);
         int k = 0;
         for (int j = 0; j < unknowns; j++)
         {
             if (_passive[j] && j != reference)
             {
-                Span<double> column = _qr.Column(k++);
-                system.Column(j).CopyTo(column);
-                if (reference >= 0 && j < system.Fractions)
-                {
-                    Vectors.AddScaled(-1, system.Column(reference), column);
-                }
+                FromReference(system, system.Column(j), j < system.Fractions ? reference : -1, _qr.Column(k++));
             }
+        }
+
+        if (hasExcess)
+        {
+            system.Column(reference).CopyTo(_qr.Column(k));
         }
 
         _qr.Factor();
         _qr.Solve(_coefficients.AsSpan(0, count));
 
+        _targetExcess = hasExcess ? _coefficients[k] : 0;
         k = 0;
-        double rest = 1;
+        double rest = 1 + _targetExcess;
         for (int j = 0; j < unknowns; j++)
         {
             _target[j] = _passive[j] && j != reference ? _coefficients[k++] : 0;
@@ -173,6 +176,7 @@ public sealed class ActiveSetKernel : IMixingKernel
             if (blocking < 0)
             {
                 _target.AsSpan(0, x.Length).CopyTo(x);
+                _excess = _targetExcess;
                 return;
             }
 
@@ -190,17 +194,25 @@ public sealed class ActiveSetKernel : IMixingKernel
         }
     }
 
-    // Fills _residual = b - A x and returns its squared length. With exact mass every column is taken relative to the reference.
+    // Fills _residual = b - A x and returns its squared length; everything is taken relative to the reference, which keeps a heavy mass row exact.
     private double Residual(MixingSystem system, ReadOnlySpan<double> b, ReadOnlySpan<double> x)
     {
+        int reference = Reference(system, x);
         Span<double> residual = _residual.AsSpan(0, system.Rows);
-        b.CopyTo(residual);
+        Span<double> column = _gap.AsSpan(0, system.Rows);
+        FromReference(system, b, reference, residual);
         for (int j = 0; j < x.Length; j++)
         {
-            if (x[j] != 0)
+            if (x[j] != 0 && j != reference)
             {
-                Vectors.AddScaled(-x[j], system.Column(j), residual);
+                FromReference(system, system.Column(j), j < system.Fractions ? reference : -1, column);
+                Vectors.AddScaled(-x[j], column, residual);
             }
+        }
+
+        if (reference >= 0 && _excess != 0)
+        {
+            Vectors.AddScaled(-_excess, system.Column(reference), residual);
         }
 
         return Vectors.Dot(residual, residual);
@@ -209,15 +221,10 @@ public sealed class ActiveSetKernel : IMixingKernel
     // The unknown at its bound whose entry lowers the misfit fastest per length of its column, or -1 where none does.
     private int SteepestBounded(MixingSystem system, ReadOnlySpan<double> b, ReadOnlySpan<double> x)
     {
-        int reference = system.ExactMass ? Reference(system, x) : -1;
+        int reference = Reference(system, x);
         ReadOnlySpan<double> residual = _residual.AsSpan(0, system.Rows);
         Span<double> gap = _gap.AsSpan(0, system.Rows);
-        b.CopyTo(gap);
-        if (reference >= 0)
-        {
-            Vectors.AddScaled(-1, system.Column(reference), gap);
-        }
-
+        FromReference(system, b, reference, gap);
         double scale = Vectors.Norm(gap);
         int steepest = -1;
         double most = 0;
@@ -228,12 +235,7 @@ public sealed class ActiveSetKernel : IMixingKernel
                 continue;
             }
 
-            system.Column(j).CopyTo(gap);
-            if (reference >= 0 && j < system.Fractions)
-            {
-                Vectors.AddScaled(-1, system.Column(reference), gap);
-            }
-
+            FromReference(system, system.Column(j), j < system.Fractions ? reference : -1, gap);
             double length = Vectors.Norm(gap);
             double slope = Vectors.Dot(gap, residual) / length;
             if (slope > DualTolerance * scale && slope > most)
@@ -246,7 +248,17 @@ public sealed class ActiveSetKernel : IMixingKernel
         return steepest;
     }
 
-    // The largest fraction of P: never zero, so it cannot be the next to leave by rounding.
+    // values - a_r, or values where there is no reference.
+    private static void FromReference(MixingSystem system, ReadOnlySpan<double> values, int reference, Span<double> difference)
+    {
+        values.CopyTo(difference);
+        if (reference >= 0)
+        {
+            Vectors.AddScaled(-1, system.Column(reference), difference);
+        }
+    }
+
+    // The largest fraction of P, or -1 where none is in it.
     private int Reference(MixingSystem system, ReadOnlySpan<double> x)
     {
         int largest = -1;

@@ -14,7 +14,7 @@ public sealed class OptimalityProof
     /// <returns>
     /// The largest of: a bound passed, |sum(x) - 1| with exact mass, and for each independent unknown the part of its gradient that should be zero
     /// (or not positive at a bound), divided by |a_j - a_r| times the longest of b - a_r and all max(1, |x_k|) (a_k - a_r): the terms that the residual is summed from.
-    /// r is the largest fraction (nothing is subtracted without exact mass). 0 is a perfect proof.
+    /// r is the largest fraction. Without exact mass its own gradient, that of the sum, is judged by the length of a_r, so that a heavy mass row hides no tracer. 0 is a perfect proof.
     /// </returns>
     public double Violation(MixingSystem system, ReadOnlySpan<double> b, ReadOnlySpan<double> x)
     {
@@ -25,14 +25,52 @@ public sealed class OptimalityProof
             _difference = new double[system.Rows];
         }
 
+        (int reference, double sum, double worst) = BoundsAndSum(system, x);
+        double scale = Vectors.Norm(Relative(system, b, reference));
+        Span<double> residual = _residual.AsSpan(0, system.Rows);
+        _difference.AsSpan(0, system.Rows).CopyTo(residual);
+        for (int j = 0; j < x.Length; j++)
+        {
+            if (j != reference)
+            {
+                ReadOnlySpan<double> column = ColumnOf(system, j, reference);
+                Vectors.AddScaled(-x[j], column, residual);
+                scale = Math.Max(scale, Math.Max(1, Math.Abs(x[j])) * Vectors.Norm(column));
+            }
+        }
+
+        if (!system.ExactMass && reference >= 0)
+        {
+            ReadOnlySpan<double> column = system.Column(reference);
+            Vectors.AddScaled(1 - sum, column, residual);
+            double length = Vectors.Norm(column);
+            worst = Math.Max(worst, Share(Math.Abs(Vectors.Dot(column, residual)), length * Math.Max(scale, length)));
+        }
+
+        for (int j = 0; j < x.Length; j++)
+        {
+            if (system.IsIndependent[j] && j != reference)
+            {
+                ReadOnlySpan<double> column = ColumnOf(system, j, reference);
+                double gradient = Vectors.Dot(column, residual);
+                bool atBound = !system.IsFree[j] && x[j] == 0;
+                worst = Math.Max(worst, Share(atBound ? gradient : Math.Abs(gradient), Vectors.Norm(column) * scale));
+            }
+        }
+
+        return worst;
+    }
+
+    private static double Share(double part, double whole) => whole > 0 ? part / whole : 0;
+
+    // The largest fraction (-1 where the sum may depart from one and all are zero), the sum, and the worst of bounds and sum.
+    private static (int Reference, double Sum, double Worst) BoundsAndSum(MixingSystem system, ReadOnlySpan<double> x)
+    {
         int reference = 0;
         double sum = 0;
         double worst = 0;
-        Span<double> residual = _residual.AsSpan(0, system.Rows);
-        b.CopyTo(residual);
         for (int j = 0; j < x.Length; j++)
         {
-            Vectors.AddScaled(-x[j], system.Column(j), residual);
             worst = system.IsFree[j] ? worst : Math.Max(worst, -x[j]);
             if (j < system.Fractions)
             {
@@ -42,28 +80,7 @@ public sealed class OptimalityProof
         }
 
         worst = system.ExactMass ? Math.Max(worst, Math.Abs(sum - 1)) : worst;
-        double scale = Vectors.Norm(Relative(system, b, reference));
-        for (int j = 0; j < x.Length; j++)
-        {
-            scale = Math.Max(scale, Math.Max(1, Math.Abs(x[j])) * Vectors.Norm(ColumnOf(system, j, reference)));
-        }
-
-        for (int j = 0; j < x.Length; j++)
-        {
-            if (!system.IsIndependent[j] || (system.ExactMass && j == reference))
-            {
-                continue;
-            }
-
-            ReadOnlySpan<double> column = ColumnOf(system, j, reference);
-            double gradient = Vectors.Dot(column, residual);
-            double unit = Vectors.Norm(column) * scale;
-            bool atBound = !system.IsFree[j] && x[j] == 0;
-            double violation = atBound ? Math.Max(0, gradient) : Math.Abs(gradient);
-            worst = Math.Max(worst, unit > 0 ? violation / unit : 0);
-        }
-
-        return worst;
+        return (system.ExactMass || x[reference] > 0 ? reference : -1, sum, worst);
     }
 
     private ReadOnlySpan<double> ColumnOf(MixingSystem system, int column, int reference) =>
@@ -73,7 +90,7 @@ public sealed class OptimalityProof
     {
         Span<double> difference = _difference.AsSpan(0, system.Rows);
         values.CopyTo(difference);
-        if (system.ExactMass)
+        if (reference >= 0)
         {
             Vectors.AddScaled(-1, system.Column(reference), difference);
         }

@@ -92,6 +92,55 @@ public class ActiveSetKernelTests
         }
     }
 
+    // A mass row, however heavy, must not drown the tracers: the answer tends to that of exact mass conservation and keeps its proof.
+    [Theory]
+    [InlineData(1e2)]
+    [InlineData(1e6)]
+    [InlineData(1e9)]
+    [InlineData(1e12)]
+    [InlineData(1e14)]
+    public void Solve_HeavyMassRow_TendsToExactMass(double weight)
+    {
+        var random = new Random(15);
+        var kernel = new ActiveSetKernel();
+        var proof = new OptimalityProof();
+        for (int trial = 0; trial < 200; trial++)
+        {
+            KernelProblem exact = KernelProblem.Random(random, 4, 6, 1, exactMass: true);
+            KernelProblem heavy = exact.WithMassRow(weight);
+
+            double[] x = heavy.Solve(kernel, out KernelOutcome outcome);
+            double[] limit = exact.Solve(kernel, out _);
+
+            Assert.Equal(KernelOutcome.Optimal, outcome);
+            Assert.True(proof.Violation(heavy.System, heavy.B, x) < 1e-12);
+            if (weight >= 1e6)
+            {
+                Assert.All(x.Zip(limit), p => Assert.Equal(p.Second, p.First, 1e-7));
+            }
+        }
+    }
+
+    // Agreement: the same heavy rows in exact rational arithmetic.
+    [Theory]
+    [InlineData(1e3)]
+    [InlineData(1e7)]
+    [InlineData(1e11)]
+    public void Solve_HeavyMassRow_AgreesWithExactEnumeration(double weight)
+    {
+        var random = new Random(16);
+        var kernel = new ActiveSetKernel();
+        for (int trial = 0; trial < 20; trial++)
+        {
+            KernelProblem problem = KernelProblem.Random(random, 4, 6, 1, exactMass: true).WithMassRow(weight);
+
+            double[] x = problem.Solve(kernel, out _);
+            (double[] exact, _) = ExactSolver.Solve(problem.Columns, problem.B, ExactSolver.Identity(7), 4, exactMass: false, problem.IsFree);
+
+            Assert.All(x.Zip(exact), p => Assert.Equal(p.Second, p.First, 1e-10));
+        }
+    }
+
     [Fact]
     public void Solve_SeveralSamples_EachAsIfAlone()
     {

@@ -49,6 +49,13 @@ internal sealed class KernelProblem
         return new KernelProblem(columns, Numbers(random, rows), fractions, exactMass, isFree);
     }
 
+    /// <summary>The same tracer rows, with mass conserved by a row in place of exactly.</summary>
+    public KernelProblem WithMassRow(double weight)
+    {
+        double[][] columns = [.. Columns.Select((c, j) => c.Append(j < System.Fractions ? weight : 0).ToArray())];
+        return new KernelProblem(columns, [.. B, weight], System.Fractions, exactMass: false, IsFree);
+    }
+
     public double[] Solve(ActiveSetKernel kernel, out KernelOutcome outcome)
     {
         double[] x = Start;
