@@ -14,7 +14,7 @@ public static partial class EndMemberSetCheck
     public static IReadOnlyList<Finding> Findings(EndMemberSet set, string at = "")
     {
         ArgumentNullException.ThrowIfNull(set);
-        var findings = new FindingList();
+        var findings = new CheckFindings();
         if (set.Version < 1)
         {
             findings.Error(JsonPointer.Append(at, "version"), "a version of 1 or more", Text(set.Version), "Count versions from 1.");
@@ -40,7 +40,7 @@ public static partial class EndMemberSetCheck
     }
 
     /// <summary>An error where an id has another form than the contract's, or stands a second time, upper and lower case alike.</summary>
-    internal static void Id(string id, string at, HashSet<string> seen, FindingList findings)
+    internal static void Id(string id, string at, HashSet<string> seen, CheckFindings findings)
     {
         if (!IdPattern().IsMatch(id))
         {
@@ -49,6 +49,10 @@ public static partial class EndMemberSetCheck
                 "an id of 1 to 32 characters: letters A to Z, digits, '.', '_' and '-', beginning with a letter or digit",
                 $"\"{id}\"",
                 "Shorten or respell the id; the name may be any text.");
+        }
+        else if (id.Equals("sum", StringComparison.OrdinalIgnoreCase))
+        {
+            findings.Error(at, "an id other than sum, which names the column of the fractions' sum", $"\"{id}\"", "Give it another id.");
         }
         else if (!seen.Add(id))
         {
@@ -60,7 +64,7 @@ public static partial class EndMemberSetCheck
     internal static bool IsKnown(string tracer, EndMemberSet set) => Quantity.Find(tracer) is not null || set.Units.ContainsKey(tracer);
 
     /// <summary>An error, and false, where a name is neither a quantity of the contract nor a tracer of the user's with a unit.</summary>
-    internal static bool IsKnown(string tracer, EndMemberSet set, string at, FindingList findings)
+    internal static bool IsKnown(string tracer, EndMemberSet set, string at, CheckFindings findings)
     {
         if (IsKnown(tracer, set))
         {
@@ -75,7 +79,7 @@ public static partial class EndMemberSetCheck
         return false;
     }
 
-    private static void Units(EndMemberSet set, string at, FindingList findings)
+    private static void Units(EndMemberSet set, string at, CheckFindings findings)
     {
         foreach ((string tracer, string unit) in set.Units)
         {
@@ -84,6 +88,10 @@ public static partial class EndMemberSetCheck
             {
                 findings.Error(place, $"{quantity.Unit}, the unit that {tracer} always has", $"\"{unit}\"", "Convert the values to that unit and take this entry out.");
             }
+            else if (tracer.Equals("mass", StringComparison.OrdinalIgnoreCase))
+            {
+                findings.Error(place, "a tracer's name other than mass, which names the column of the mass residual", $"\"{tracer}\"", "Give the tracer another name.");
+            }
             else if (string.IsNullOrWhiteSpace(tracer) || string.IsNullOrWhiteSpace(unit))
             {
                 findings.Error(place, "a tracer's name and its unit", $"\"{tracer}\": \"{unit}\"", "Give both; a tracer without a unit has the unit \"1\".");
@@ -91,7 +99,7 @@ public static partial class EndMemberSetCheck
         }
     }
 
-    private static void OfOne(EndMember endMember, EndMemberSet set, string at, FindingList findings)
+    private static void OfOne(EndMember endMember, EndMemberSet set, string at, CheckFindings findings)
     {
         string values = JsonPointer.Append(at, "values");
         foreach ((string tracer, double value) in endMember.Values)
@@ -134,7 +142,7 @@ public static partial class EndMemberSetCheck
         }
     }
 
-    private static void Value(string tracer, double value, string at, FindingList findings)
+    private static void Value(string tracer, double value, string at, CheckFindings findings)
     {
         Quantity quantity = Quantity.FindOrFurther(tracer);
         if (!double.IsFinite(value))
@@ -159,7 +167,7 @@ public static partial class EndMemberSetCheck
         }
     }
 
-    private static void Spread(IReadOnlyDictionary<string, double> spread, EndMember endMember, EndMemberSet set, string at, FindingList findings)
+    private static void Spread(IReadOnlyDictionary<string, double> spread, EndMember endMember, EndMemberSet set, string at, CheckFindings findings)
     {
         foreach ((string tracer, double sd) in spread)
         {
@@ -180,7 +188,7 @@ public static partial class EndMemberSetCheck
         }
     }
 
-    private static void Range(double value, double lowest, double highest, string unit, string at, FindingList findings)
+    private static void Range(double value, double lowest, double highest, string unit, string at, CheckFindings findings)
     {
         if (!(value >= lowest && value <= highest))
         {

@@ -23,7 +23,7 @@ public static class TemperatureSalinityConversion
     public static ConvertedSet Convert(EndMemberSet set, TemperatureSalinityPair to)
     {
         ArgumentNullException.ThrowIfNull(set);
-        var findings = new FindingList();
+        var findings = new CheckFindings();
         EndMember[] converted = [.. set.EndMembers.Select((endMember, i) => OfOne(endMember, to, JsonPointer.Append("/endMembers", i), findings))];
         return new ConvertedSet(findings.Items.Count == 0 ? set with { EndMembers = converted } : null, findings.Items);
     }
@@ -32,7 +32,7 @@ public static class TemperatureSalinityConversion
         ? (Quantity.ConservativeTemperature.Id, Quantity.AbsoluteSalinity.Id)
         : (Quantity.PotentialTemperature.Id, Quantity.PracticalSalinity.Id);
 
-    private static EndMember OfOne(EndMember endMember, TemperatureSalinityPair to, string at, FindingList findings)
+    private static EndMember OfOne(EndMember endMember, TemperatureSalinityPair to, string at, CheckFindings findings)
     {
         TemperatureSalinityPair other = to == TemperatureSalinityPair.ConservativeAndAbsolute ? TemperatureSalinityPair.PotentialAndPractical : TemperatureSalinityPair.ConservativeAndAbsolute;
         (string newTemperature, string newSalinity) = Ids(to);

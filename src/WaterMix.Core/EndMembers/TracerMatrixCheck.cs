@@ -10,7 +10,7 @@ internal static class TracerMatrixCheck
     private const double Tolerance = 1e-9;
 
     /// <summary>Findings on a correlation matrix: square, symmetric, unit diagonal, entries in [-1, 1], positive semi-definite.</summary>
-    public static void Correlation(TracerMatrix matrix, string at, FindingList findings)
+    public static void Correlation(TracerMatrix matrix, string at, CheckFindings findings)
     {
         if (!HasShape(matrix, at, findings))
         {
@@ -48,7 +48,7 @@ internal static class TracerMatrixCheck
     }
 
     /// <summary>Findings on a covariance matrix: square, symmetric, positive definite.</summary>
-    public static void Covariance(TracerMatrix matrix, string at, FindingList findings)
+    public static void Covariance(TracerMatrix matrix, string at, CheckFindings findings)
     {
         if (!HasShape(matrix, at, findings))
         {
@@ -76,7 +76,7 @@ internal static class TracerMatrixCheck
         }
     }
 
-    private static bool HasShape(TracerMatrix matrix, string at, FindingList findings)
+    private static bool HasShape(TracerMatrix matrix, string at, CheckFindings findings)
     {
         int n = matrix.Tracers.Count;
         var seen = new HashSet<string>(StringComparer.Ordinal);
@@ -104,7 +104,7 @@ internal static class TracerMatrixCheck
         return sound;
     }
 
-    private static bool IsSymmetric(TracerMatrix matrix, string at, FindingList findings)
+    private static bool IsSymmetric(TracerMatrix matrix, string at, CheckFindings findings)
     {
         bool sound = true;
         for (int i = 0; i < matrix.Tracers.Count; i++)

@@ -1,6 +1,7 @@
 using System.Collections.Concurrent;
 using System.Globalization;
 using WaterMix.Core.Mixing.Kernels;
+using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
 
 namespace WaterMix.Core.Mixing;
@@ -57,9 +58,11 @@ public static class MixingSolver
             if (values.Impossible(row) is { } column)
             {
                 result.Status[row] = SolveStatus.BadInput;
+                Quantity quantity = column.Quantity;
+                string unit = quantity.Unit is "1" or "" ? "" : " " + quantity.Unit;
                 result.Notes[row] = string.Create(
                     CultureInfo.InvariantCulture,
-                    $"{column.Id} {column.Values[row]} is not possible: {column.Quantity.Lowest} to {column.Quantity.Highest} {column.Quantity.Unit} is");
+                    $"{column.Id} {column.Values[row]} is not possible: {quantity.Lowest} to {quantity.Highest}{unit} is");
                 return;
             }
 
@@ -117,9 +120,7 @@ public static class MixingSolver
             result.TracerCount[row] = _fitter.TracerCount;
             if (_fitter.Status == SolveStatus.TooFewTracers)
             {
-                result.Notes[row] = string.Create(
-                    CultureInfo.InvariantCulture,
-                    $"{_fitter.TracerCount} usable tracers for {_fitter.UnknownCount} unknowns; without a usable value: {string.Join(", ", UnusableTracers(layer))}");
+                result.Notes[row] = TooFew(layer);
                 return;
             }
 
@@ -156,14 +157,29 @@ public static class MixingSolver
             result.Notes[row] = Remarks(row, layer);
         }
 
-        private IEnumerable<string> UnusableTracers(PreparedLayer layer) =>
-            Enumerable.Range(0, model.Model.Tracers.Count)
-                .Where(t => layer.Uses(t) && double.IsNaN(model.Transform.Value(t, _parents)))
-                .Select(t => model.Model.Tracers[t]);
+        private string TooFew(PreparedLayer layer)
+        {
+            int[] tracers = [.. Enumerable.Range(0, model.Model.Tracers.Count)];
+            string[] unusable = [.. tracers.Where(t => layer.Uses(t) && double.IsNaN(model.Transform.Value(t, _parents))).Select(t => model.Model.Tracers[t])];
+            string[] leftOut = [.. tracers.Where(t => !layer.Uses(t)).Select(t => model.Model.Tracers[t])];
+            return string.Create(CultureInfo.InvariantCulture, $"{_fitter.TracerCount} usable tracers for {_fitter.UnknownCount} unknowns")
+                + (unusable.Length > 0 ? $"; without a usable value: {string.Join(", ", unusable)}" : "")
+                + (leftOut.Length > 0 ? $"; left out of the layer, its end-members do not differ: {string.Join(", ", leftOut)}" : "");
+        }
 
         private string? Remarks(int row, PreparedLayer layer)
         {
+            if (double.IsNaN(_fitter.FractionSum))
+            {
+                return "the errors given span too many orders of magnitude to be weighed against each other";
+            }
+
             List<string>? remarks = null;
+            if (_fitter.Status == SolveStatus.NotConverged)
+            {
+                (remarks ??= []).Add(string.Create(CultureInfo.InvariantCulture, $"the fractions still changed by {_fitter.LastChange:0.0e+0} at the last iteration"));
+            }
+
             if (_fitter.Status == SolveStatus.NotUnique)
             {
                 (remarks ??= []).Add($"dependent on those before: {string.Join(", ", Dependent(layer))}");

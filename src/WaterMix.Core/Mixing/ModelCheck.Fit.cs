@@ -4,7 +4,7 @@ namespace WaterMix.Core.Mixing;
 
 public static partial class ModelCheck
 {
-    private static void OfFit(MixingModel model, FindingList findings)
+    private static void OfFit(MixingModel model, CheckFindings findings)
     {
         IReadOnlyList<string> parents = Parents(model);
         foreach ((string quantity, MeasurementError error) in model.Fit.MeasurementSd)
@@ -33,7 +33,7 @@ public static partial class ModelCheck
         }
     }
 
-    private static void OfLeastSquares(MixingModel model, GeneralisedLeastSquares fit, IReadOnlyList<string> parents, FindingList findings)
+    private static void OfLeastSquares(MixingModel model, GeneralisedLeastSquares fit, IReadOnlyList<string> parents, CheckFindings findings)
     {
         const string At = "/fit/measurementCovariance";
         if (fit.MeasurementCovariance is { } covariance)
@@ -63,7 +63,7 @@ public static partial class ModelCheck
         }
     }
 
-    private static void OfWeightedRows(MixingModel model, WeightedRows fit, FindingList findings)
+    private static void OfWeightedRows(MixingModel model, WeightedRows fit, CheckFindings findings)
     {
         foreach ((string tracer, double weight) in fit.Weights)
         {
@@ -97,9 +97,9 @@ public static partial class ModelCheck
     }
 
     // How far the sources of a layer lie apart in each tracer: what a standardised row is divided by.
-    private static void Spreads(MixingModel model, WeightedRows fit, Layer layer, FindingList findings)
+    private static void Spreads(MixingModel model, WeightedRows fit, Layer layer, CheckFindings findings)
     {
-        EndMember[] over = fit.Over == StandardiseOver.Set ? [.. model.EndMembers.EndMembers] : [.. Permitted(model, layer).Select(p => p.EndMember)];
+        EndMember[] over = StandardisedOver(model, fit, layer);
         foreach ((int i, string tracer) in Rows(model))
         {
             (_, double sd) = fit.Factors.SpreadOf(tracer, over, fit.SdOver);
@@ -125,6 +125,21 @@ public static partial class ModelCheck
         }
     }
 
+    private static EndMember[] StandardisedOver(MixingModel model, WeightedRows fit, Layer layer) =>
+        fit.Over == StandardiseOver.Set ? [.. model.EndMembers.EndMembers] : [.. Permitted(model, layer).Select(p => p.EndMember)];
+
+    // The number of tracers that are rows in a layer: standardising leaves out those in which the end-members do not differ.
+    private static int RowsIn(MixingModel model, Layer layer)
+    {
+        if (model.Fit is not WeightedRows { Standardise: not Standardisation.None } fit)
+        {
+            return Rows(model).Count();
+        }
+
+        EndMember[] over = StandardisedOver(model, fit, layer);
+        return Rows(model).Count(row => fit.Factors.SpreadOf(row.Tracer, over, fit.SdOver).Sd != 0);
+    }
+
     // One standard deviation of a tracer's measurement near the end-members' mean; NaN where it is not given for every parent.
     private static double MeasurementSd(WeightedRows fit, string tracer, EndMember[] over)
     {
@@ -144,7 +159,7 @@ public static partial class ModelCheck
         return Math.Sqrt(variance);
     }
 
-    private static void Error(MeasurementError error, string at, FindingList findings)
+    private static void Error(MeasurementError error, string at, CheckFindings findings)
     {
         if (!(error.Absolute > 0 && double.IsFinite(error.Absolute)))
         {
@@ -157,7 +172,7 @@ public static partial class ModelCheck
         }
     }
 
-    private static void NoteUnlessFitted(string quantity, IReadOnlyList<string> fitted, string at, string what, FindingList findings)
+    private static void NoteUnlessFitted(string quantity, IReadOnlyList<string> fitted, string at, string what, CheckFindings findings)
     {
         if (!fitted.Contains(quantity))
         {
@@ -165,7 +180,7 @@ public static partial class ModelCheck
         }
     }
 
-    private static void Factors(DerivedTracerFactors factors, FindingList findings)
+    private static void Factors(DerivedTracerFactors factors, CheckFindings findings)
     {
         (string At, double Value, bool IsOffset)[] all =
         [

@@ -7,7 +7,7 @@ public static partial class ModelCheck
 {
     private static readonly Quantity[] Sigmas = [Quantity.Sigma0, Quantity.Sigma1, Quantity.Sigma2, Quantity.Sigma3, Quantity.Sigma4];
 
-    private static void OfLayers(MixingModel model, FindingList findings)
+    private static void OfLayers(MixingModel model, CheckFindings findings)
     {
         var ids = new HashSet<string>(StringComparer.Ordinal);
         for (int i = 0; i < model.Layers.Count; i++)
@@ -38,7 +38,7 @@ public static partial class ModelCheck
         }
     }
 
-    private static void Sources(MixingModel model, Layer layer, string at, FindingList findings)
+    private static void Sources(MixingModel model, Layer layer, string at, CheckFindings findings)
     {
         if (layer.EndMembers.Count == 0)
         {
@@ -61,19 +61,19 @@ public static partial class ModelCheck
         }
     }
 
-    private static void Unknowns(MixingModel model, Layer layer, string at, FindingList findings)
+    private static void Unknowns(MixingModel model, Layer layer, string at, CheckFindings findings)
     {
-        int tracers = Rows(model).Count();
+        int tracers = RowsIn(model, layer);
         int sources = Permitted(model, layer).Count;
         Process[] acting = [.. model.Processes.Where(process => Acts(model, process))];
         int always = sources - 1 + acting.Count(process => process.Where.Count == 0);
         int most = sources - 1 + acting.Length;
-        if (sources == 0 || tracers == 0 || most <= tracers)
+        if (sources == 0 || !Rows(model).Any() || Math.Max(most, 1) <= tracers)
         {
             return;
         }
 
-        string which = always > tracers ? "no sample" : "no sample where all processes act";
+        string which = Math.Max(always, 1) > tracers ? "no sample" : "no sample where all processes act";
         findings.Warning(
             at,
             $"no more unknowns (end-members less one, plus processes) than tracers, of which there are {Text(tracers)}",
@@ -81,7 +81,23 @@ public static partial class ModelCheck
             $"With these, {which} can be solved; add tracers, or permit fewer end-members or processes.");
     }
 
-    private static void Conditions(MixingModel model, IReadOnlyList<Condition> conditions, string owner, FindingList findings)
+    // A longitude range may wrap round, so that only what names one meridian twice, or one bound beyond the date line alone, says nothing.
+    private static void Meridians(Condition condition, string at, CheckFindings findings)
+    {
+        if (condition.AtLeast is { } start && condition.LessThan is { } end)
+        {
+            if (end - start < 360 && (end - start) % 360 == 0)
+            {
+                findings.Error(at, "a range between two meridians", $"{Text(start)} and {Text(end)}, which are the same one", "No longitude is in such a range; correct the bounds, or take the condition out.");
+            }
+        }
+        else if ((condition.AtLeast ?? condition.LessThan) is > 180)
+        {
+            findings.Error(at, "both bounds, or one of at most 180 degrees east", $"{Text((condition.AtLeast ?? condition.LessThan)!.Value)} alone", "Longitudes of samples count from -180 to 180; give the other bound.");
+        }
+    }
+
+    private static void Conditions(MixingModel model, IReadOnlyList<Condition> conditions, string owner, CheckFindings findings)
     {
         for (int i = 0; i < conditions.Count; i++)
         {
@@ -95,8 +111,12 @@ public static partial class ModelCheck
 
             Bound(condition, condition.AtLeast, JsonPointer.Append(at, "atLeast"), findings);
             Bound(condition, condition.LessThan, JsonPointer.Append(at, "lessThan"), findings);
-            bool wraps = condition.Quantity == Quantity.Longitude.Id && condition.AtLeast != condition.LessThan;
-            if (condition.AtLeast >= condition.LessThan && !wraps)
+            bool isLongitude = condition.Quantity == Quantity.Longitude.Id;
+            if (isLongitude)
+            {
+                Meridians(condition, at, findings);
+            }
+            else if (condition.AtLeast >= condition.LessThan)
             {
                 findings.Error(
                     at,
@@ -112,7 +132,7 @@ public static partial class ModelCheck
         }
     }
 
-    private static void Bound(Condition condition, double? bound, string at, FindingList findings)
+    private static void Bound(Condition condition, double? bound, string at, CheckFindings findings)
     {
         if (bound is not { } value)
         {

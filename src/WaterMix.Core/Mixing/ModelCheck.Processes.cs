@@ -4,7 +4,7 @@ namespace WaterMix.Core.Mixing;
 
 public static partial class ModelCheck
 {
-    private static void OfProcesses(MixingModel model, FindingList findings)
+    private static void OfProcesses(MixingModel model, CheckFindings findings)
     {
         IReadOnlyList<string> parents = Parents(model);
         var ids = model.EndMembers.EndMembers.Select(e => e.Id).ToHashSet(StringComparer.OrdinalIgnoreCase);
@@ -19,7 +19,7 @@ public static partial class ModelCheck
         }
     }
 
-    private static void Ratios(MixingModel model, Process process, IReadOnlyList<string> parents, string at, FindingList findings)
+    private static void Ratios(MixingModel model, Process process, IReadOnlyList<string> parents, string at, CheckFindings findings)
     {
         string own = JsonPointer.Append(at, process.Per);
         if (!process.Ratios.TryGetValue(process.Per, out double perOwn))

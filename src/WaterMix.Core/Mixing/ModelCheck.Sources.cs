@@ -4,7 +4,7 @@ namespace WaterMix.Core.Mixing;
 
 public static partial class ModelCheck
 {
-    private static void OfSources(MixingModel model, FindingList findings)
+    private static void OfSources(MixingModel model, CheckFindings findings)
     {
         IReadOnlyList<string> parents = Parents(model);
         var permitted = model.LayersOrAll.SelectMany(layer => Permitted(model, layer)).DistinctBy(p => p.Index).OrderBy(p => p.Index).ToList();
@@ -37,7 +37,7 @@ public static partial class ModelCheck
     }
 
     // What is assumed about an end-member's spread where it does not say.
-    private static void Assumptions(MixingModel model, int index, EndMember endMember, IReadOnlyList<string> parents, FindingList findings)
+    private static void Assumptions(MixingModel model, int index, EndMember endMember, IReadOnlyList<string> parents, CheckFindings findings)
     {
         string[] without = [.. parents.Where(parent => !endMember.Sd.ContainsKey(parent))];
         if (model.Fit is GeneralisedLeastSquares { Spread: not EndMemberSpread.None } && without.Length > 0)
@@ -69,7 +69,7 @@ public static partial class ModelCheck
     }
 
     // Two sources that no tracer tells apart share their fraction in any way.
-    private static void Twins(MixingModel model, Layer layer, FindingList findings)
+    private static void Twins(MixingModel model, Layer layer, CheckFindings findings)
     {
         List<(int Index, EndMember EndMember)> permitted = Permitted(model, layer);
         string[] rows = [.. Rows(model).Select(row => row.Tracer)];

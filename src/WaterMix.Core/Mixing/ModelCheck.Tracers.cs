@@ -13,7 +13,7 @@ public static partial class ModelCheck
         (Quantity.PotentialTemperature.Id, Quantity.AbsoluteSalinity.Id),
     ];
 
-    private static void OfTracers(MixingModel model, FindingList findings)
+    private static void OfTracers(MixingModel model, CheckFindings findings)
     {
         if (model.Tracers.Count == 0)
         {
@@ -79,7 +79,7 @@ public static partial class ModelCheck
             : "Use it in a layer's \"where\" instead.";
     }
 
-    private static void Pairs(MixingModel model, FindingList findings)
+    private static void Pairs(MixingModel model, CheckFindings findings)
     {
         foreach ((string one, string other) in NeverTogether)
         {
@@ -96,7 +96,7 @@ public static partial class ModelCheck
     }
 
     // Tracers as linear forms of measured quantities: Gram-Schmidt finds the first that the ones before it already determine.
-    private static void Dependence(MixingModel model, FindingList findings)
+    private static void Dependence(MixingModel model, CheckFindings findings)
     {
         IReadOnlyList<string> parents = Parents(model);
         var basis = new List<double[]>();

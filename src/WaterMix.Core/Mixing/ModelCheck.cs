@@ -19,7 +19,7 @@ public static partial class ModelCheck
     public static IReadOnlyList<Finding> Findings(MixingModel model)
     {
         ArgumentNullException.ThrowIfNull(model);
-        var findings = new FindingList();
+        var findings = new CheckFindings();
         OfTracers(model, findings);
         OfFit(model, findings);
         OfSources(model, findings);
@@ -57,7 +57,7 @@ public static partial class ModelCheck
         return path;
     }
 
-    private static void OfFlags(IReadOnlyList<int> flags, string at, FindingList findings)
+    private static void OfFlags(IReadOnlyList<int> flags, string at, CheckFindings findings)
     {
         for (int i = 0; i < flags.Count; i++)
         {

@@ -6,7 +6,7 @@ namespace WaterMix.Core.Mixing;
 /// Fits one sample after another: assembles the whitened system from the usable tracers, hands it to the kernel, and reads the answer back.
 /// The last sample's answer stands in the properties. Owns its work arrays: one fitter per thread.
 /// </summary>
-internal sealed class SampleFitter
+internal sealed partial class SampleFitter
 {
     private const double SettledChange = 1e-9;
     private const int MostIterations = 50;
@@ -87,6 +87,9 @@ internal sealed class SampleFitter
     /// <summary>Degrees of freedom on the active set.</summary>
     public int DegreesOfFreedom { get; private set; }
 
+    /// <summary>The largest change of a fraction in the last iteration; 0 where nothing is iterated.</summary>
+    public double LastChange { get; private set; }
+
     /// <summary>The proof's violation, recomputed from the whitened rows of the last system solved.</summary>
     public double KktViolation { get; private set; }
 
@@ -115,6 +118,7 @@ internal sealed class SampleFitter
         _residuals.AsSpan().Fill(double.NaN);
         _amounts.AsSpan().Fill(double.NaN);
         KktViolation = double.NaN;
+        LastChange = 0;
         if (_rowCount < Math.Max(UnknownCount, 1))
         {
             Status = SolveStatus.TooFewTracers;
@@ -210,7 +214,8 @@ internal sealed class SampleFitter
             }
 
             optimal = RunKernel();
-            settled = spread != EndMemberSpread.Iterated || TakeFractions() < SettledChange;
+            LastChange = spread == EndMemberSpread.Iterated ? TakeFractions() : 0;
+            settled = LastChange < SettledChange;
             if (spread == EndMemberSpread.Iterated && !FactorCovariance())
             {
                 optimal = false;
@@ -219,93 +224,6 @@ internal sealed class SampleFitter
         }
 
         return !unique ? SolveStatus.NotUnique : settled && optimal ? SolveStatus.Solved : SolveStatus.NotConverged;
-    }
-
-    // S for the fractions as they stand. With the spread fixed they are all 1/n, which makes sum x_i^2 V_i the fixed matrix.
-    private bool FactorCovariance()
-    {
-        bool withSpread = _leastSquares is { Spread: not EndMemberSpread.None };
-        FillMeasurementCovariance();
-        for (int i = 0; i < _layer.Permitted.Length && withSpread; i++)
-        {
-            double share = _fractions[i] * _fractions[i];
-            double[] spread = _layer.Spreads[i];
-            for (int a = 0; a < _rowCount; a++)
-            {
-                for (int b = 0; b <= a; b++)
-                {
-                    ref double entry = ref _covariance[a, b];
-                    entry = Math.FusedMultiplyAdd(share, spread[(_rows[a] * TracerTotal) + _rows[b]], entry);
-                }
-            }
-        }
-
-        return _covariance.Factor();
-    }
-
-    private void FillMeasurementCovariance()
-    {
-        _covariance.Reshape(_rowCount);
-        for (int a = 0; a < _rowCount; a++)
-        {
-            double[] left = _model.Transform.Rows[_rows[a]];
-            for (int b = 0; b <= a; b++)
-            {
-                double[] right = _model.Transform.Rows[_rows[b]];
-                double sum = _model.MeasurementCovariance[(_rows[a] * TracerTotal) + _rows[b]];
-                for (int k = 0; k < _parents.Length; k++)
-                {
-                    double factor = left[k] * right[k];
-                    if (factor != 0)
-                    {
-                        double error = _model.RelativeErrors[k] * _parents[k];
-                        sum = Math.FusedMultiplyAdd(factor, error * error, sum);
-                    }
-                }
-
-                _covariance[a, b] = sum;
-            }
-        }
-    }
-
-    // The system before weighing: tracer rows in the tracers' units, relative to the first end-member where mass is exact (the centred form),
-    // relative to the standardising means where it is not, and the mass row.
-    private void Assemble()
-    {
-        int members = _layer.Permitted.Length;
-        bool exact = Mass.IsExact;
-        _system.Reshape(exact ? _rowCount : _rowCount + 1, members, _processCount, exact);
-        Span<double> b = RightHandSide;
-        for (int r = 0; r < _rowCount; r++)
-        {
-            int t = _rows[r];
-            double origin = exact ? _layer.Values[0][t] : _layer.Means.Length > 0 ? _layer.Means[t] : 0;
-            b[r] = _observed[t] - origin;
-            for (int i = 0; i < members; i++)
-            {
-                _system.Column(i)[r] = _layer.Values[i][t] - origin;
-            }
-
-            for (int k = 0; k < _processCount; k++)
-            {
-                double ratio = _model.ProcessColumns[_processes[k]][t];
-                _system.Column(members + k)[r] = Sign(k) == ProcessSign.NonPositive ? -ratio : ratio;
-            }
-        }
-
-        for (int k = 0; k < _processCount; k++)
-        {
-            _system.IsFree[members + k] = Sign(k) == ProcessSign.Free;
-        }
-
-        if (Mass.Weight is { } weight)
-        {
-            b[_rowCount] = weight;
-            for (int j = 0; j < _system.Unknowns; j++)
-            {
-                _system.Column(j)[_rowCount] = j < members ? weight : 0;
-            }
-        }
     }
 
     private ProcessSign Sign(int amount) => _model.Model.Processes[_processes[amount]].Sign;
@@ -370,103 +288,5 @@ internal sealed class SampleFitter
         }
 
         return change;
-    }
-
-    private void ReadBack()
-    {
-        int members = _system.Fractions;
-        KktViolation = _proof.Violation(_system, RightHandSide, Unknowns);
-        TakeFractions();
-        FractionSum = 0;
-        int positive = 0;
-        foreach (double fraction in Fractions)
-        {
-            FractionSum += fraction;
-            positive += fraction > 0 ? 1 : 0;
-        }
-
-        int nonZero = 0;
-        for (int k = 0; k < _processCount; k++)
-        {
-            double amount = _unknowns[members + k];
-            amount = Sign(k) == ProcessSign.NonPositive && amount != 0 ? -amount : amount;
-            _amounts[_processes[k]] = amount;
-            nonZero += amount != 0 ? 1 : 0;
-        }
-
-        double massRow = Mass.Weight is { } weight ? weight * (1 - FractionSum) : 0;
-        DegreesOfFreedom = Mass.IsExact ? _rowCount - (positive - 1) - nonZero : _rowCount + 1 - positive - nonZero;
-        FindResiduals();
-        if (_leastSquares is null)
-        {
-            Chi2 = WeightedRowsChi2();
-            Misfit = Vectors.Norm(SystemResidual());
-        }
-        else
-        {
-            // S as it was factored last: with the iterated spread that is S at the final fractions.
-            Chi2 = Math.FusedMultiplyAdd(massRow, massRow, WhitenedLength());
-            Misfit = Math.Sqrt(Chi2);
-        }
-    }
-
-    // Observed minus fitted. With exact mass everything is taken relative to the first end-member, which loses no digits to the common part.
-    private void FindResiduals()
-    {
-        for (int r = 0; r < _rowCount; r++)
-        {
-            int t = _rows[r];
-            double origin = Mass.IsExact ? _layer.Values[0][t] : 0;
-            double rest = _observed[t] - origin;
-            for (int i = 0; i < _layer.Permitted.Length; i++)
-            {
-                rest = Math.FusedMultiplyAdd(-_fractions[i], _layer.Values[i][t] - origin, rest);
-            }
-
-            for (int k = 0; k < _processCount; k++)
-            {
-                rest = Math.FusedMultiplyAdd(-_amounts[_processes[k]], _model.ProcessColumns[_processes[k]][t], rest);
-            }
-
-            _residuals[t] = rest;
-        }
-    }
-
-    // The rows that were minimised, the mass row included: centred rows see a departure of the sum from one, the residuals in units do not.
-    private Span<double> SystemResidual()
-    {
-        Span<double> rest = RightHandSide;
-        for (int j = 0; j < _system.Unknowns; j++)
-        {
-            Vectors.AddScaled(-Unknowns[j], _system.Column(j), rest);
-        }
-
-        return rest;
-    }
-
-    private double WeightedRowsChi2()
-    {
-        for (int r = 0; r < _rowCount; r++)
-        {
-            if (!_model.HasMeasurementError[_rows[r]])
-            {
-                return double.NaN;
-            }
-        }
-
-        FillMeasurementCovariance();
-        return _covariance.Factor() ? WhitenedLength() : double.NaN;
-    }
-
-    private double WhitenedLength()
-    {
-        Span<double> whitened = _whitened.AsSpan(0, _rowCount);
-        for (int r = 0; r < _rowCount; r++)
-        {
-            whitened[r] = _residuals[_rows[r]];
-        }
-
-        _covariance.Whiten(whitened);
-        return Vectors.Dot(whitened, whitened);
     }
 }

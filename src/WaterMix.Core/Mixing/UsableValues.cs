@@ -7,10 +7,8 @@ namespace WaterMix.Core.Mixing;
 /// <summary>The values of a table that a model may use: derived where the table lacks them, and missing where their flag is not accepted.</summary>
 internal sealed class UsableValues
 {
-    private static readonly Quantity[] Inputs =
-    [
-        Quantity.Latitude, Quantity.Longitude, Quantity.Pressure, Quantity.InSituTemperature, Quantity.PracticalSalinity,
-    ];
+    // Position and pressure stand in every result, so they count as used whatever the model reads.
+    private static readonly string[] Places = [Quantity.Latitude.Id, Quantity.Longitude.Id, Quantity.Pressure.Id];
 
     private readonly AcceptedFlags _accepted;
     private readonly Dictionary<(string, DensityScale), SampleColumn?> _conditions = [];
@@ -29,7 +27,7 @@ internal sealed class UsableValues
                 : derived.Find(condition.Quantity);
         }
 
-        _checked = [.. Inputs.Select(derived.Find).Concat(Parents).Concat(_conditions.Values).OfType<SampleColumn>().Distinct()];
+        _checked = [.. Places.Concat(model.InputIds).Select(derived.Find).Concat(Parents).Concat(_conditions.Values).OfType<SampleColumn>().Distinct()];
     }
 
     /// <summary>The column of each parent quantity, or null where there is none.</summary>

@@ -270,6 +270,109 @@ public class MixingSolverTests
         Assert.True(double.IsNaN(result.Residuals[5][0]));
     }
 
+    // Regression: sources on a Redfield line have one N*, but not to the last bit; the rounding must not become a row.
+    [Fact]
+    public void Solve_WeightedRowsDerivedTracerAlikeWithinRounding_IsLeftOut()
+    {
+        string[] tracers = ["potential_temperature", "practical_salinity", "n_star", "silicate"];
+        double[][] values = [[4, 34.2, 14.4, 0.9, 20], [3, 34.95, 16, 1.0, 18], [-0.5, 34.66, 17.6, 1.1, 120]];
+        EndMember[] members = [.. values.Select((v, i) => Twin.Member($"m{i}", Twin.Exact) with
+        {
+            Values = new[] { "potential_temperature", "practical_salinity", "nitrate", "phosphate", "silicate" }.Zip(v).ToDictionary(p => p.First, p => p.Second),
+        })];
+        var model = new MixingModel(
+            "redfield", new EndMemberSet("s", 1, members), tracers, new WeightedRows(tracers.ToDictionary(t => t, _ => 1.0)), MassConservation.Exact);
+
+        MixingResult result = Twin.Solve(model, [2, 34.7, 200, 16.1, 1.005, 50]);
+
+        Assert.Equal(3, result.TracerCount[0]);
+        Assert.True(double.IsNaN(result.Residuals[2][0]));
+        Assert.InRange(result.Misfit[0], 0, 10);
+        Assert.Contains(ModelCheck.Findings(model), f => f.Remedy.Contains("n_star is left out", StringComparison.Ordinal));
+    }
+
+    // Regression: respiration in the ratios that PO is defined with changes neither PO nor N*; what is left by rounding is no process.
+    [Fact]
+    public void Solve_ProcessThatCancelsInDerivedTracers_IsOff()
+    {
+        var respiration = new Process("respiration", "phosphate", new Dictionary<string, double> { ["phosphate"] = 1, ["nitrate"] = 16, ["oxygen"] = -170.1 });
+        MixingModel model = Twin.LeastSquares(EndMemberSpread.None) with
+        {
+            Tracers = ["potential_temperature", "practical_salinity", "po", "n_star", "silicate"],
+            Processes = [respiration],
+        };
+        model = model with { Fit = model.Fit with { Factors = new DerivedTracerFactors { PoOxygenPerPhosphate = 170.1 } } };
+
+        MixingResult result = Twin.Solve(model, Twin.Exact);
+
+        Assert.True(double.IsNaN(result.Amounts[0][0]));
+        Assert.Equal("respiration is off: it changes none of the tracers used", result.Notes[0]);
+        Assert.Contains(ModelCheck.Findings(model), f => f.Remedy.Contains("off for every sample", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Solve_WeightedRowsOneSourceStandardised_SaysWhyNothingIsLeft()
+    {
+        MixingModel model = Twin.Model(new WeightedRows(Twin.ByTracer([1, 1, 1, 1, 1, 1]))) with
+        {
+            Processes = [],
+            Layers = [new Layer("one", ["b"], [])],
+        };
+
+        MixingResult result = Twin.Solve(model, Twin.Exact);
+
+        Assert.Equal(SolveStatus.TooFewTracers, result.Status[0]);
+        Assert.StartsWith("0 usable tracers for 0 unknowns; left out of the layer, its end-members do not differ: potential_temperature", result.Notes[0], StringComparison.Ordinal);
+        Assert.Contains(ModelCheck.Findings(model), f => f.Remedy.Contains("no sample can be solved", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Solve_ErrorsBeyondWeighing_SaysSo()
+    {
+        MixingModel model = Twin.LeastSquares(EndMemberSpread.None, [1e-200, 0.003, 1.5, 0.2, 0.02, 0.6]);
+
+        MixingResult result = Twin.Solve(model, Twin.Exact);
+
+        Assert.Equal(SolveStatus.NotConverged, result.Status[0]);
+        Assert.True(double.IsNaN(result.Fractions[0][0]));
+        Assert.Contains("too many orders of magnitude", result.Notes[0], StringComparison.Ordinal);
+    }
+
+    // Thresholds published in the older equation of state act on its values: sigma2 of EOS-80 and TEOS-10 differ by about 0.01 here.
+    [Fact]
+    public void Solve_LayerInEos80_TestsTheOlderDensity()
+    {
+        SampleTable table = WithPressure(3000).With(
+        [
+            new SampleColumn(Quantity.Latitude, [30]),
+            new SampleColumn(Quantity.Longitude, [-40]),
+        ]);
+        double teos10 = Core.Seawater.SampleDerivation.Derive(table, ["sigma2"]).Table.Find("sigma2")!.Values[0];
+        double eos80 = Core.Seawater.SampleDerivation.Eos80Anomaly(table, Quantity.Sigma2).Values[0];
+        Assert.InRange(Math.Abs(teos10 - eos80), 0.002, 0.03);
+        double between = 0.5 * (teos10 + eos80);
+        string[] all = ["a", "b", "c", "e"];
+        MixingModel model = Twin.LeastSquares(EndMemberSpread.None) with
+        {
+            Layers =
+            [
+                new Layer("older", all, [new Condition("sigma2", between, null) { Scale = DensityScale.Eos80 }]),
+                new Layer("newer", all, [new Condition("sigma2", between, null)]),
+            ],
+        };
+
+        Assert.Equal(eos80 > teos10 ? 0 : 1, Twin.Solve(model, table).Layer[0]);
+    }
+
+    [Fact]
+    public void Solve_ImpossibleValueThatTheModelDoesNotRead_IsNoMatter()
+    {
+        SampleTable table = Twin.Table(Twin.Exact).With([new SampleColumn(Quantity.InSituTemperature, [-99])]);
+        MixingModel model = Twin.LeastSquares(EndMemberSpread.None) with { Tracers = ["practical_salinity", "oxygen", "nitrate", "phosphate", "silicate"] };
+
+        Assert.Equal(SolveStatus.Solved, Twin.Solve(model, table).Status[0]);
+    }
+
     // Algebra: NO and PO take the respired part out, so solving with them and no process gives the mixture again.
     [Fact]
     public void Solve_DerivedTracers_FollowFromTheirParents()
@@ -353,6 +456,7 @@ public class MixingSolverTests
         Assert.All(result.Fractions, f => Assert.InRange(f[0], 0, 1));
         Assert.All(result.Residuals, r => Assert.True(double.IsFinite(r[0])));
         Assert.True(result.KktViolation![0] < 1e-9);
+        Assert.StartsWith("the fractions still changed by ", result.Notes[0], StringComparison.Ordinal);
     }
 
     [Fact]

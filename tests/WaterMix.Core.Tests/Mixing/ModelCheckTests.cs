@@ -233,6 +233,11 @@ public class ModelCheckTests
     [InlineData("longitude", 350.0, 10.0, true)]
     [InlineData("longitude", 10.0, 10.0, false)]
     [InlineData("longitude", -200.0, 10.0, false)]
+    [InlineData("longitude", 190.0, null, false)]
+    [InlineData("longitude", null, 190.0, false)]
+    [InlineData("longitude", 180.0, -180.0, false)]
+    [InlineData("longitude", 360.0, 0.0, false)]
+    [InlineData("longitude", 0.0, 360.0, true)]
     [InlineData("in_situ_temperature", 1.0, 2.0, true)]
     public void Findings_Conditions_AreRangesOfKnownQuantities(string quantity, double? atLeast, double? lessThan, bool isSound)
     {

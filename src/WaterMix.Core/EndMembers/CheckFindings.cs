@@ -1,7 +1,7 @@
 namespace WaterMix.Core.EndMembers;
 
 /// <summary>Findings of a check, collected with their places.</summary>
-internal sealed class FindingList
+internal sealed class CheckFindings
 {
     private readonly List<Finding> _items = [];
 
