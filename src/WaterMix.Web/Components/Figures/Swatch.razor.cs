@@ -1,0 +1,20 @@
+using Microsoft.AspNetCore.Components;
+using WaterMix.Web.State.Figures;
+
+namespace WaterMix.Web.Components.Figures;
+
+/// <summary>A small mark in a source's colour, readable in both themes; beside a name, never instead of one.</summary>
+public sealed partial class Swatch
+{
+    /// <summary>The colour, <c>#rrggbb</c> or a theme variable.</summary>
+    [Parameter, EditorRequired]
+    public string Colour { get; set; } = "";
+
+    /// <summary>The shape.</summary>
+    [Parameter]
+    public PointShape Shape { get; set; } = PointShape.Square;
+
+    /// <summary>How strong the colour is over the sheet's, 0 to 1.</summary>
+    [Parameter]
+    public double Strength { get; set; } = 1;
+}
