@@ -10,8 +10,8 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
 {
     private readonly Dictionary<string, SourceColumn> _byName = header.Columns.ToDictionary(c => c.Name, StringComparer.Ordinal);
 
-    /// <summary>The plan for the file; problems become findings.</summary>
-    public FilePlan Plan()
+    /// <summary>The plan for the file, or null where its first line names no column of samples; problems become findings.</summary>
+    public FilePlan? Plan()
     {
         List<ColumnMatch> matches = NitrateFromSum(SettleAmbiguity(Matches()));
         var identity = new Dictionary<string, SourceColumn>(StringComparer.Ordinal);
@@ -39,6 +39,7 @@ internal sealed class FilePlanner(FileHeader header, ReadingOptions options, Fin
         {
             findings.Add(new Finding(Severity.Error, "column names of samples, such as station, latitude, pressure, oxygen", $"a first line with none of them ('{string.Join("', '", header.Columns.Take(3).Select(c => c.Name))}', ...)", "Begin the table with a header line, or name its columns in a match file (--columns).")
             { File = header.File.Name, Line = header.NamesLine });
+            return null;
         }
 
         return new FilePlan(header, columns, identity, bottleFlag, matches);

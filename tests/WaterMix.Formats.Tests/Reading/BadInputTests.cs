@@ -32,7 +32,7 @@ public class BadInputTests
     [InlineData("1,2,3\n4,5,6\n")]
     [InlineData("{ \"a\": 1 }\n")]
     public void Open_NoKnownColumnName_IsAnError(string text) =>
-        Assert.Contains(ReadingHelp.Findings(text), f => f.Severity == Severity.Error && f.Expected.StartsWith("column names of samples", StringComparison.Ordinal) && f.Line == 1);
+        Assert.True(ReadingHelp.Error(ReadingHelp.Findings(text)) is { Line: 1 } error && error.Expected.StartsWith("column names of samples", StringComparison.Ordinal));
 
     [Fact]
     public void ReadBlocks_ExchangeWithoutEndData_IsAnError()
