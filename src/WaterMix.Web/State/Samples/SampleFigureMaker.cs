@@ -23,15 +23,15 @@ public sealed class SampleFigureMaker(StudySamples samples)
         string x = samples.Has(view.X) ? view.X : samples.FirstOf("practical_salinity", "absolute_salinity");
         string y = samples.Has(view.Y) ? view.Y : samples.FirstOf("potential_temperature", "in_situ_temperature", "pressure");
         string colour = view.Colour.Length == 0 || samples.Has(view.Colour) ? view.Colour : "";
-        MapStation? station = ProfilePlot.StationOf(samples, view.Station, rows);
-        IReadOnlyList<string> profiles = ProfilePlot.QuantitiesOf(samples, view.Profiles);
+        MapStation? station = StationProfiles.StationOf(samples, view.Station, rows);
+        IReadOnlyList<string> profiles = StationProfiles.QuantitiesOf(samples, view.Profiles);
         string? compared = InstrumentDifference.QuantityOf(samples, view.Compare);
         return new SampleFigures(
             rows,
             Kept("stations", rows, () => StationsOf(rows)),
             Kept("section", (place, section), () => SectionOfCasts.Of(samples, cruise, section, place)),
             Kept("property", (rows, x, y, colour), () => PropertyPlot.Of(samples, x, y, colour, rows)),
-            Kept("profiles", (station?.Id, string.Join(',', profiles)), () => ProfilePlot.Of(samples, station, profiles)),
+            Kept("profiles", (station?.Id, string.Join(',', profiles)), () => StationProfiles.Of(samples, station, profiles)),
             compared is null ? null : Kept("difference", (rows, compared), () => InstrumentDifference.Of(samples, compared, rows)));
     }
 

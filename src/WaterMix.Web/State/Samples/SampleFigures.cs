@@ -10,4 +10,4 @@ namespace WaterMix.Web.State.Samples;
 /// <param name="Profiles">The profiles at one station.</param>
 /// <param name="Difference">Bottle against CTD; null where no quantity has both.</param>
 public sealed record SampleFigures(
-    int[] Rows, IReadOnlyList<MapStation> Stations, SectionOfCasts Section, PropertyPlot Property, ProfilePlot Profiles, InstrumentDifference? Difference);
+    int[] Rows, IReadOnlyList<MapStation> Stations, SectionOfCasts Section, PropertyPlot Property, StationProfiles Profiles, InstrumentDifference? Difference);

@@ -25,6 +25,7 @@ public sealed class StudySamples
         Accepted = accepted;
         Columns = new FigureColumns(tables, accepted, factors);
         Quantities = [.. Offered(tables)];
+        Land = Samples.Land.Of(tables);
     }
 
     /// <summary>The ids of densities, in the order in which they are offered.</summary>
@@ -41,6 +42,9 @@ public sealed class StudySamples
 
     /// <summary>The quantities that figures can show: measured ones first, then derived ones.</summary>
     public IReadOnlyList<QuantityChoice> Quantities { get; }
+
+    /// <summary>The land around the stations; null for the earth's.</summary>
+    public Coastline? Land { get; }
 
     /// <summary>True where a quantity can be shown.</summary>
     /// <param name="id">Its id.</param>

@@ -9,7 +9,7 @@ namespace WaterMix.Web.State.Samples;
 /// <param name="Pressure">Pressure of every row of the study.</param>
 /// <param name="Series">One series per quantity and instrument.</param>
 /// <param name="Caption">What is shown, in a sentence.</param>
-public sealed record ProfilePlot(string Station, string Title, double[] Pressure, IReadOnlyList<ProfileSeries> Series, string Caption)
+public sealed record StationProfiles(string Station, string Title, double[] Pressure, IReadOnlyList<ProfileSeries> Series, string Caption)
 {
     private const int Most = 4;
 
@@ -56,14 +56,14 @@ public sealed record ProfilePlot(string Station, string Title, double[] Pressure
     /// <param name="samples">The samples of the study.</param>
     /// <param name="station">The station; null for none.</param>
     /// <param name="quantities">The quantities.</param>
-    public static ProfilePlot Of(StudySamples samples, MapStation? station, IReadOnlyList<string> quantities)
+    public static StationProfiles Of(StudySamples samples, MapStation? station, IReadOnlyList<string> quantities)
     {
         ArgumentNullException.ThrowIfNull(samples);
         ArgumentNullException.ThrowIfNull(quantities);
         double[] pressure = samples.Columns.Values("pressure");
         if (station is null)
         {
-            return new ProfilePlot("", "Profiles", pressure, [], "No sample on screen belongs to a station.");
+            return new StationProfiles("", "Profiles", pressure, [], "No sample on screen belongs to a station.");
         }
 
         var series = new List<ProfileSeries>();
@@ -81,7 +81,7 @@ public sealed record ProfilePlot(string Station, string Title, double[] Pressure
         }
 
         string place = $"{FigureText.Latitude(station.Latitude)}, {FigureText.Longitude(station.Longitude)}";
-        return new ProfilePlot(station.Id, FigureText.Sentence(station.Label), pressure, series, $"{FigureText.Sentence(station.Label)}, {place}: {PlainText.Count(station.Rows.Count, "sample")}.");
+        return new StationProfiles(station.Id, FigureText.Sentence(station.Label), pressure, series, $"{FigureText.Sentence(station.Label)}, {place}: {PlainText.Count(station.Rows.Count, "sample")}.");
     }
 
     private static ProfileSeries SeriesOf(StudySamples samples, MapStation station, string quantity, string column, string name, string colour, PointShape shape)
