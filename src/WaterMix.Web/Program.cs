@@ -24,6 +24,10 @@ try
     await app.RunAsync();
     return 0;
 }
+catch (OperationCanceledException)
+{
+    return 0; // Stopped before it listened.
+}
 catch (IOException fault) when (fault.InnerException is AddressInUseException)
 {
     return StartMessages.Refuse($"{fault.Message.TrimEnd('.')}. Stop the program that uses the address, or name another with --urls http://localhost:5081.");

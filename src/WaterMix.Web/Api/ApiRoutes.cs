@@ -1,4 +1,3 @@
-using Microsoft.AspNetCore.Http.HttpResults;
 using Microsoft.AspNetCore.OpenApi;
 
 namespace WaterMix.Web.Api;
@@ -16,7 +15,6 @@ internal static class ApiRoutes
         api.MapRuns();
         api.MapColumns();
         api.MapExamples();
-        api.Map("/{**rest}", NoSuchEndpoint).ExcludeFromDescription();
         routes.MapOpenApi("/openapi/{documentName}.json");
     }
 
@@ -30,6 +28,14 @@ internal static class ApiRoutes
         return Task.CompletedTask;
     });
 
-    private static ProblemHttpResult NoSuchEndpoint(HttpContext context) =>
-        TypedResults.Problem($"There is no {context.Request.Method} {context.Request.Path} here. /openapi/v1.json lists what there is.", statusCode: StatusCodes.Status404NotFound, title: "Not found");
+    /// <summary>Adds a sentence to the answers that the framework makes by itself.</summary>
+    public static void Explain(ProblemDetailsOptions options) => options.CustomizeProblemDetails = context =>
+        context.ProblemDetails.Detail ??= context.HttpContext.Response.StatusCode switch
+        {
+            StatusCodes.Status404NotFound => "There is nothing at this address. /openapi/v1.json lists what there is.",
+            StatusCodes.Status405MethodNotAllowed => "This address takes another method. /openapi/v1.json says which.",
+            StatusCodes.Status415UnsupportedMediaType => "This address takes a multipart form (multipart/form-data). /openapi/v1.json says with which fields.",
+            StatusCodes.Status400BadRequest => "A parameter is missing or not of its type. /openapi/v1.json lists them.",
+            _ => "Something failed here; nothing was changed. Try again; if it fails again, the window in which WaterMix runs says more.",
+        };
 }

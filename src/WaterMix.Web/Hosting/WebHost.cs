@@ -17,6 +17,11 @@ internal static class WebHost
     public static WebApplication Build(WebApplicationBuilder builder)
     {
         builder.WebHost.UseStaticWebAssets();
+        builder.Logging.AddFilter("Microsoft", LogLevel.Warning);
+        builder.Logging.AddFilter("Microsoft.Extensions.Hosting", LogLevel.None); // Why a start failed is said in one sentence.
+
+        // It warns that keys are not encrypted: they lie beside the studies, which are not either.
+        builder.Logging.AddFilter("Microsoft.AspNetCore.DataProtection", LogLevel.Error);
         builder.WebHost.ConfigureKestrel(kestrel => kestrel.AddServerHeader = false);
         AddServices(builder.Services, builder.Configuration);
         WebApplication app = builder.Build();
@@ -35,7 +40,7 @@ internal static class WebHost
             circuits.DisconnectedCircuitRetentionPeriod = TimeSpan.FromMinutes(30);
         }).AddHubOptions(hub => hub.MaximumReceiveMessageSize = 512 << 10); // A lasso's corners, at most; samples never come this way.
         services.AddRadzenComponents();
-        services.AddProblemDetails();
+        services.AddProblemDetails(ApiRoutes.Explain);
         services.AddOpenApi(ApiRoutes.Describe);
         services.AddSingleton<ScratchFolders>();
         services.AddHealthChecks();
@@ -53,8 +58,11 @@ internal static class WebHost
     {
         app.UseMiddleware<SecurityHeaders>();
         app.UseMiddleware<HostAndOrigin>();
-        app.UseExceptionHandler("/error", createScopeForErrors: true);
-        app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
+        app.UseWhen(IsForPrograms, branch => branch.UseExceptionHandler().UseStatusCodePages());
+        app.UseWhen(context => !IsForPrograms(context), branch => branch
+            .UseExceptionHandler("/error", createScopeForErrors: true)
+            .UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true));
+        app.UseRouting();
         app.UseAntiforgery();
         app.MapStaticAssets();
         app.MapHealthChecks("/health");
@@ -62,4 +70,7 @@ internal static class WebHost
         app.MapApi();
         app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null); // Ours has it.
     }
+
+    /// <summary>True where a program reads the answer: problem details there, pages elsewhere.</summary>
+    private static bool IsForPrograms(HttpContext context) => context.Request.Path.StartsWithSegments("/api") || context.Request.Path.StartsWithSegments("/uploads");
 }
