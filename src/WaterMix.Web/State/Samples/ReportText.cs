@@ -27,6 +27,8 @@ public sealed class ReportText
         Sources = [.. Merging.Select(SourceSentence).OfType<string>()];
         Conversions = [.. report.Columns.Where(c => c.Conversion.Length > 0 && !IsOriginal(c.Id)).Select(c => $"{NameOf(c.Id)}: {c.Conversion}")];
         BottleFlags = report.BottleFlags.Count == 0 ? "" : "Bottle flags: " + string.Join(", ", report.BottleFlags.OrderBy(f => f.Key).Select(f => $"{PlainText.Count(f.Value)} with flag {f.Key} ({FlagText.OfBottle(f.Key)})")) + ".";
+        string[] unknown = [.. report.Columns.Where(c => c.MatchedBy == "own-name").Select(c => c.Id)];
+        Unknown = unknown.Length == 0 ? "" : $"Names not known, kept as further tracers: {string.Join(", ", unknown)}.";
         LeftOut = report.LeftOut.Count == 0 ? "" : $"Not used: {string.Join(", ", report.LeftOut)}.";
     }
 
@@ -59,6 +61,9 @@ public sealed class ReportText
 
     /// <summary>How many bottles have which flag, or empty.</summary>
     public string BottleFlags { get; }
+
+    /// <summary>The columns that were kept as further tracers because their names are not known, or empty.</summary>
+    public string Unknown { get; }
 
     /// <summary>The header names that were not used, or empty.</summary>
     public string LeftOut { get; }
@@ -126,6 +131,7 @@ public sealed class ReportText
     private static ReportPoint Point(Finding finding)
     {
         string remedy = finding.Remedy
+            .Replace("declare the text as missing in a match file (--columns)", "declare the text as missing under “How the files are written”", StringComparison.Ordinal)
             .Replace("a match file (--columns, \"flag\")", "the columns below", StringComparison.Ordinal)
             .Replace("a match file (--columns)", "the columns below", StringComparison.Ordinal)
             .Replace("A match file (--columns)", "The columns below", StringComparison.Ordinal)
