@@ -56,13 +56,13 @@ public sealed class MeasurementErrorForm
             {
                 continue;
             }
-            else if (absolute is not > 0 || perCent < 0)
+            else if (absolute is not > 0 || perCent is < 0 or > 100)
             {
-                line.Problem = "The absolute part must be above 0 and the per cent part 0 or more; or leave both empty for the model’s.";
+                line.Problem = "The absolute part must be above 0 and the per cent part from 0 to 100; or leave both empty for the model’s.";
             }
             else
             {
-                read[line.Id] = new MeasurementError(absolute.Value, (perCent ?? 0) / 100);
+                read[line.Id] = new MeasurementError(absolute.Value, (double)((decimal)(perCent ?? 0) / 100)); // 0.7 % is 0.007, not a digit beside it.
             }
         }
 

@@ -29,7 +29,7 @@ public sealed class TypedTextTests
 
     [Theory]
     [InlineData("−1.5", -1.5)]
-    [InlineData("1e3", 1000)]
+    [InlineData("1e3", 1000.0)]
     [InlineData(" ", null)]
     public void TryParse_ABound_TakesNumbersAndNothing(string text, double? expected)
     {
