@@ -47,7 +47,7 @@ internal static class ConvertCommand
             return Messages.NotUsable(findings);
         }
 
-        using OpenedSamples samples = SampleReader.Open(paths, options, cancellation);
+        using OpenedSamples samples = SampleReader.Open(paths, options with { Cancellation = cancellation });
         if (samples.HasErrors)
         {
             return Messages.NotUsable(samples.Findings);

@@ -29,7 +29,7 @@ internal static class InspectCommand
             return Messages.NotUsable(findings);
         }
 
-        using OpenedSamples samples = SampleReader.Open(paths, options, cancellation);
+        using OpenedSamples samples = SampleReader.Open(paths, options with { Cancellation = cancellation });
         var progress = new SampleProgress("read");
         foreach (SampleBlock block in samples.ReadBlocks(cancellation))
         {

@@ -53,7 +53,7 @@ internal static class SolveCommand
             readingOptions = readingOptions with { NeededQuantities = model.InputIds, Prefer = model.Model.Prefer };
         }
 
-        using OpenedSamples samples = SampleReader.Open(paths, readingOptions ?? new ReadingOptions(), options.Cancellation);
+        using OpenedSamples samples = SampleReader.Open(paths, (readingOptions ?? new ReadingOptions()) with { Cancellation = options.Cancellation });
         if (model is null || readingOptions is null || samples.HasErrors)
         {
             return Messages.NotUsable([.. findings, .. samples.Findings]);

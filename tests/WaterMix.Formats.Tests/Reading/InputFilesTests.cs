@@ -82,6 +82,32 @@ public sealed class InputFilesTests : IDisposable
         Assert.Equal("a whole zip file", ReadingHelp.Error(opened.Findings).Expected);
     }
 
+    [Fact]
+    public void Open_ZipOfOneEntry_NamesItsFile()
+    {
+        using OpenedSamples opened = SampleReader.Open([Zip(("a.csv", Cast("1")))], new ReadingOptions());
+
+        Assert.True(opened.NamesFiles);
+    }
+
+    [Fact]
+    public void Open_SecondEntryOfOneName_IsAWarning()
+    {
+        using OpenedSamples opened = SampleReader.Open([Zip(("a.csv", Cast("1")), ("a.csv", Cast("2")))], new ReadingOptions());
+
+        Finding finding = Assert.Single(opened.Findings);
+        Assert.Equal((Severity.Warning, "casts.zip/a.csv"), (finding.Severity, finding.File));
+        Assert.Equal(2, ReadingHelp.ReadAll(opened).Blocks.Count);
+    }
+
+    [Fact]
+    public void Open_FileThatDoesNotExist_IsASentenceWithOneFullStop()
+    {
+        using OpenedSamples opened = SampleReader.Open([Path.Combine(_folder, "absent.csv")], new ReadingOptions());
+
+        Assert.EndsWith("absent.csv'. Check the path and the permissions.", ReadingHelp.Error(opened.Findings).ToString(), StringComparison.Ordinal);
+    }
+
     private static string Cast(string station) =>
         $"CTD,20000101TEST\n# a comment\nNUMBER_HEADERS = 2\nSTNNBR = {station}\nCTDPRS,CTDOXY,CTDOXY_FLAG_W,\nDBAR,UMOL/KG,,\n     1.0,  200.5,2\n     2.0, -999.0,9\nEND_DATA\n";
 
