@@ -45,8 +45,8 @@ public sealed class OpenedSamples : IDisposable
         Missing = _options.Match?.Missing ?? [],
     };
 
-    /// <summary>True where the rows of several files run on, so that results name the file of each.</summary>
-    public bool HasSeveralFiles => _plans.Count > 1;
+    /// <summary>True where results name the file of each row: the input is several files, or a zip file even of one entry.</summary>
+    public bool NamesFiles => _plans.Count > 1 || _plans.Any(p => p.Header.File.IsZipEntry);
 
     /// <summary>What was made of the files, as far as the reading that was begun last came.</summary>
     public ImportReport Report => _tally.Report(_plans, _schema, Findings);
