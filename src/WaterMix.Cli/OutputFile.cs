@@ -18,7 +18,9 @@ internal sealed class OutputFile : IDisposable
         _path = path;
         string folder = path is null ? Path.GetTempPath() : Path.GetDirectoryName(Path.GetFullPath(path))!;
         _unfinished = Path.Combine(folder, $".{(path is null ? "watermix" : Path.GetFileName(path))}.{Path.GetRandomFileName()}.unfinished");
-        _stream = Naming(() => new FileStream(_unfinished, FileMode.CreateNew, FileAccess.ReadWrite, FileShare.Delete, 1 << 16));
+
+        // The writers buffer; a stream that did too would fail once more on a full disk when it is closed, before the file is removed.
+        _stream = Naming(() => new FileStream(_unfinished, FileMode.CreateNew, FileAccess.ReadWrite, FileShare.Delete, bufferSize: 0));
         if (path is null)
         {
             // Its name is not needed; without one nothing is left of it however the process ends.
