@@ -28,12 +28,30 @@ internal sealed class InputFiles : IDisposable
     /// <exception cref="OperationCanceledException">The work was cancelled.</exception>
     public static InputFiles Find(IReadOnlyList<string> paths, FindingList findings, CancellationToken cancellation)
     {
+        var namesakes = paths.GroupBy(Path.GetFileName, StringComparer.Ordinal).Where(g => g.Count() > 1).SelectMany(g => g).ToHashSet(StringComparer.Ordinal);
+        StoredFile[] files = [.. paths.OrderBy(Path.GetFileName, StringComparer.Ordinal).ThenBy(p => p, StringComparer.Ordinal)
+            .Select(path => new StoredFile(path, namesakes.Contains(path) ? path : Path.GetFileName(path)))];
+        return Find(files, path => path, findings, cancellation);
+    }
+
+    /// <summary>Finds files that people know by another name than they stand under; messages keep to that name.</summary>
+    /// <param name="stored">The files, in any order.</param>
+    /// <param name="findings">Where problems go.</param>
+    /// <param name="cancellation">Ends the waiting for what comes through a pipe.</param>
+    public static InputFiles Find(IReadOnlyList<StoredFile> stored, FindingList findings, CancellationToken cancellation)
+    {
+        var names = stored.ToDictionary(f => f.Path, f => f.Name, StringComparer.Ordinal);
+        StoredFile[] files = [.. stored.OrderBy(f => f.Name, StringComparer.Ordinal).ThenBy(f => f.Path, StringComparer.Ordinal)];
+        return Find(files, path => names[path], findings, cancellation);
+    }
+
+    private static InputFiles Find(StoredFile[] files, Func<string, string> shown, FindingList findings, CancellationToken cancellation)
+    {
         var inputs = new InputFiles();
         try
         {
-            var namesakes = paths.GroupBy(Path.GetFileName, StringComparer.Ordinal).Where(g => g.Count() > 1).SelectMany(g => g).ToHashSet(StringComparer.Ordinal);
             var before = new HashSet<string>(RealPath.Comparer);
-            foreach (string path in paths.OrderBy(Path.GetFileName, StringComparer.Ordinal).ThenBy(p => p, StringComparer.Ordinal))
+            foreach ((string path, string name) in files)
             {
                 if (path.Length == 0)
                 {
@@ -43,10 +61,10 @@ internal sealed class InputFiles : IDisposable
 
                 if (!before.Add(RealPath.Of(path)))
                 {
-                    findings.Add(new Finding(Severity.Warning, "every file once", "a file that was already given", "Its rows are counted twice; leave out one of the two.") { File = path });
+                    findings.Add(new Finding(Severity.Warning, "every file once", "a file that was already given", "Its rows are counted twice; leave out one of the two.") { File = shown(path) });
                 }
 
-                inputs.Add(path, namesakes.Contains(path) ? path : Path.GetFileName(path), findings, cancellation);
+                inputs.Add(path, name, shown(path), findings, cancellation);
             }
         }
         catch
@@ -67,13 +85,13 @@ internal sealed class InputFiles : IDisposable
         }
     }
 
-    private void Add(string path, string name, FindingList findings, CancellationToken cancellation)
+    private void Add(string path, string name, string shown, FindingList findings, CancellationToken cancellation)
     {
         try
         {
             if (Directory.Exists(path))
             {
-                findings.Add(new Finding(Severity.Error, "a file", "a folder", "Name the files in it.") { File = path });
+                findings.Add(new Finding(Severity.Error, "a file", "a folder", "Name the files in it.") { File = shown });
                 return;
             }
 
@@ -82,7 +100,7 @@ internal sealed class InputFiles : IDisposable
             {
                 _held.Add(spooled);
                 open = spooled.Open;
-                name = path;
+                name = shown;
             }
 
             if (IsZip(open))
@@ -96,7 +114,7 @@ internal sealed class InputFiles : IDisposable
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
-            findings.Add(UnreadableFile.Of(e, "a file that can be opened", "Check the path and the permissions.", path));
+            findings.Add(UnreadableFile.Of(e, "a file that can be opened", "Check the path and the permissions.", shown));
         }
         catch (InvalidDataException e)
         {

@@ -48,6 +48,9 @@ public sealed class OpenedSamples : IDisposable
     /// <summary>True where results name the file of each row: the input is several files, or a zip file even of one entry.</summary>
     public bool NamesFiles => _plans.Count > 1 || _plans.Any(p => p.Header.File.IsZipEntry);
 
+    /// <summary>The header names of the first file, in order.</summary>
+    public IReadOnlyList<string> Headers => _plans.Count == 0 ? [] : [.. _plans[0].Header.Columns.Select(c => c.Name)];
+
     /// <summary>What was made of the files, as far as the reading that was begun last came.</summary>
     public ImportReport Report => _tally.Report(_plans, _schema, Findings);
 
