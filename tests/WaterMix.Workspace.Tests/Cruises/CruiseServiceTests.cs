@@ -137,6 +137,7 @@ public class CruiseServiceTests
     [InlineData("C:\\data\\a\u202Efdp.csv", "afdp.csv")]
     [InlineData("a\u0000b\n.csv", "ab.csv")]
     [InlineData("<b>x</b>.csv", "b>.csv")]
+    [InlineData("=cmd|' /C calc'!A0.csv", "C calc'!A0.csv")]
     public async Task Receive_NamesThatMeanHarm_BecomeHarmless(string given, string kept)
     {
         using var scratch = new Scratch();
@@ -147,6 +148,18 @@ public class CruiseServiceTests
 
         Assert.Equal(kept, Assert.Single(trial.Report.Files).Name);
         Assert.Equal(["00001"], Directory.GetFiles(scratch.Path("uploads"), "*", SearchOption.AllDirectories).Select(Path.GetFileName));
+    }
+
+    [Theory]
+    [InlineData(130)]
+    [InlineData(131)]
+    public void Harmless_ALongName_IsCutBetweenCharacters(int characters)
+    {
+        string name = UploadName.Harmless(string.Concat(Enumerable.Repeat("\U0001F41F", characters)) + "a.csv");
+
+        Assert.InRange(name.Length, 100, 120);
+        Assert.EndsWith("a.csv", name, StringComparison.Ordinal);
+        Assert.DoesNotContain('\uFFFD', Encoding.UTF8.GetString(Encoding.UTF8.GetBytes(name)));
     }
 
     [Theory]
