@@ -18,4 +18,8 @@ public sealed record Cruise(
     long SampleCount,
     Guid Upload,
     ImportReport Report,
-    IReadOnlyDictionary<string, MeasurementError>? MeasurementSd);
+    IReadOnlyDictionary<string, MeasurementError>? MeasurementSd)
+{
+    /// <summary>The options it was read with, to begin from when it is read again.</summary>
+    public ReadingOptions Reading { get; init; } = new();
+}

@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using WaterMix.Core.Mixing;
 using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
@@ -14,7 +15,7 @@ public sealed class FigureColumns
 {
     private readonly AcceptedFlags _accepted;
     private readonly DerivedTracerFactors? _factors;
-    private readonly Dictionary<string, double[]> _columns = new(StringComparer.Ordinal);
+    private readonly ConcurrentDictionary<string, double[]> _columns = new(StringComparer.Ordinal); // Pages compute beside the thread that draws.
     private readonly int[] _firstRows;
     private CruiseTrack? _track;
 
