@@ -71,7 +71,7 @@ public static partial class ModelEdits
         double between = model.Fit.Factors.SpreadOf(tracer, set, SdDivisor.N).Sd;
         double within = set.Select(e => VarianceWithin(e, model.Fit.Factors.FormOf(tracer).Terms)).DefaultIfEmpty(double.NaN).Max();
         double weight = between * between / within;
-return weight > 0 && double.IsFinite(weight) ? FourDigits(weight) : 1;
+        return weight > 0 && double.IsFinite(weight) ? FourDigits(weight) : 1;
     }
 
     private static double VarianceWithin(EndMember endMember, IReadOnlyList<(string Parent, double Factor)> terms) =>

@@ -25,4 +25,18 @@ public static class StartingModel
         MixingModel with = Usual.Where(measured.Contains).Aggregate(model, ModelEdits.AddTracer);
         return WinterMask.With(with, WinterMask.UsualDbar);
     }
+
+    /// <summary>Gives a new study that has samples its model to begin with, as a step that can be undone.</summary>
+    /// <param name="editor">The editor of the study, opened.</param>
+    /// <param name="samples">Its samples, read.</param>
+    public static async Task EnsureAsync(DraftEditor editor, StudySamples samples)
+    {
+        ArgumentNullException.ThrowIfNull(editor);
+        ArgumentNullException.ThrowIfNull(samples);
+        bool isNew = editor is { Study: { Revision: 0, Cruises.Count: > 0 }, UndoWords: null, RedoWords: null };
+        if (isNew && IsUntouched(editor.Model))
+        {
+            await editor.EditAsync("the model to begin with", model => From(model, samples.Tracers(model)));
+        }
+    }
 }
