@@ -5,8 +5,13 @@ namespace WaterMix.Core.Mixing;
 /// </summary>
 public sealed class MixingResult
 {
-    internal MixingResult(PreparedModel model, int rows, bool withProof)
+    /// <summary>A result without numbers yet, to be filled by whoever makes it: the solver, or a reader of stored results.</summary>
+    /// <param name="model">The model.</param>
+    /// <param name="rows">Number of samples.</param>
+    /// <param name="withProof">True to make room for each sample's optimality violation.</param>
+    public MixingResult(PreparedModel model, int rows, bool withProof)
     {
+        ArgumentNullException.ThrowIfNull(model);
         MixingModel source = model.Model;
         Model = model;
         RowCount = rows;

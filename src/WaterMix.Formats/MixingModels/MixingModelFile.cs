@@ -72,6 +72,18 @@ public static class MixingModelFile
             : new Reading<MixingModel>(ofSet.Value is null ? null : reading.Value, [.. reading.Findings, .. ofSet.Findings]);
     }
 
+    /// <summary>Reads a model that may still be incomplete, its set inline: the shape must be right, the meaning is not looked at.</summary>
+    /// <param name="utf8">The model's bytes, as <see cref="Write"/> lays them out.</param>
+    /// <param name="fileName">The model's name for findings.</param>
+    /// <returns>The model, or null where a finding is an error. <see cref="ModelCheck"/> says what the model lacks.</returns>
+    public static Reading<MixingModel> ReadDraft(ReadOnlySpan<byte> utf8, string fileName)
+    {
+        StrictJsonDocument document = StrictJsonDocument.Parse(utf8, fileName);
+        MixingModel? draft = document.Root is null ? null
+            : MixingModelReader.Read(document.Root, node => (EndMemberSetReader.Read(node, needsSchema: false), null));
+        return document.Finish(draft);
+    }
+
     /// <summary>
     /// Writes a model: keys in the contract's order, what equals its default left out. The set is written as the model holds it: inline,
     /// or as the name of its file (<see cref="MixingModel.EndMembersFile"/>), which is not written here.

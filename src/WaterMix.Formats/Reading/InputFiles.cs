@@ -24,17 +24,25 @@ internal sealed class InputFiles : IDisposable
     /// <summary>Finds the files; what cannot be opened becomes a finding.</summary>
     /// <param name="paths">Paths of files.</param>
     /// <param name="findings">Where problems go.</param>
-    public static InputFiles Find(IReadOnlyList<string> paths, FindingList findings)
+    public static InputFiles Find(IReadOnlyList<string> paths, FindingList findings) =>
+        Find([.. paths.Select(path => (path, Path.GetFileName(path), path))], findings);
+
+    /// <summary>Finds files that people know by another name than they stand under.</summary>
+    /// <param name="files">The files.</param>
+    /// <param name="findings">Where problems go.</param>
+    public static InputFiles Find(IReadOnlyList<StoredFile> files, FindingList findings) =>
+        Find([.. files.Select(file => (file.Path, file.Name, file.Name))], findings);
+
+    private static InputFiles Find(IReadOnlyList<(string Path, string Name, string Shown)> files, FindingList findings)
     {
         var inputs = new InputFiles();
-        foreach (string path in paths.OrderBy(Path.GetFileName, StringComparer.Ordinal).ThenBy(p => p, StringComparer.Ordinal))
+        foreach ((string path, string name, string shown) in files.OrderBy(f => f.Name, StringComparer.Ordinal).ThenBy(f => f.Path, StringComparer.Ordinal))
         {
-            string name = Path.GetFileName(path);
             try
             {
                 if (Directory.Exists(path))
                 {
-                    findings.Add(new Finding(Severity.Error, "a file", "a folder", "Name the files in it.") { File = path });
+                    findings.Add(new Finding(Severity.Error, "a file", "a folder", "Name the files in it.") { File = shown });
                 }
                 else if (IsZip(path))
                 {
@@ -47,7 +55,7 @@ internal sealed class InputFiles : IDisposable
             }
             catch (Exception e) when (e is IOException or UnauthorizedAccessException)
             {
-                findings.Add(new Finding(Severity.Error, "a file that can be opened", e.Message, "Check the path and the permissions.") { File = path });
+                findings.Add(new Finding(Severity.Error, "a file that can be opened", e.Message, "Check the path and the permissions.") { File = shown });
             }
             catch (InvalidDataException e)
             {

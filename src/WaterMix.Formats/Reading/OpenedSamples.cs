@@ -45,6 +45,9 @@ public sealed class OpenedSamples : IDisposable
         Missing = _options.Match?.Missing ?? [],
     };
 
+    /// <summary>The header names of the first file, in order.</summary>
+    public IReadOnlyList<string> Headers => _plans.Count == 0 ? [] : [.. _plans[0].Header.Columns.Select(c => c.Name)];
+
     /// <summary>True where the rows of several files run on, so that results name the file of each.</summary>
     public bool HasSeveralFiles => _plans.Count > 1;
 

@@ -18,7 +18,19 @@ public static class SampleReader
         return Open(inputs.Files, options, new SeawaterPerKilogram(), findings, inputs);
     }
 
-    /// <summary>Opens files that stand somewhere else than on a path, such as an upload.</summary>
+    /// <summary>Opens files that people know by another name than they stand under; zip files are unpacked as they are read.</summary>
+    /// <param name="files">The files, in any order; they are read in ordinal order of their names.</param>
+    /// <param name="options">What the person says about them.</param>
+    public static OpenedSamples OpenStored(IReadOnlyList<StoredFile> files, ReadingOptions options)
+    {
+        ArgumentNullException.ThrowIfNull(files);
+        ArgumentNullException.ThrowIfNull(options);
+        var findings = new FindingList();
+        InputFiles inputs = InputFiles.Find(files, findings);
+        return Open(inputs.Files, options, new SeawaterPerKilogram(), findings, inputs);
+    }
+
+    /// <summary>Opens files that stand somewhere else than on a path, such as in memory.</summary>
     /// <param name="files">The files, in the order of their rows.</param>
     /// <param name="options">What the person says about them.</param>
     public static OpenedSamples Open(IReadOnlyList<InputFile> files, ReadingOptions options)

@@ -5,9 +5,9 @@ namespace WaterMix.Web.State;
 /// <summary>Numbers and times as a person reads them.</summary>
 public static class PlainText
 {
-    private static readonly NumberFormatInfo ForPeople = new() { NumberGroupSeparator = "\u202f", NegativeSign = "\u2212" };
+    private static readonly NumberFormatInfo ForPeople = new() { NumberGroupSeparator = "\u00a0", NegativeSign = "\u2212" };
 
-    /// <summary>A count with narrow spaces between thousands: 2 841.</summary>
+    /// <summary>A count with no-break spaces between thousands: 2 841.</summary>
     /// <param name="count">The count.</param>
     public static string Count(long count) => count.ToString("N0", ForPeople);
 

@@ -2,14 +2,6 @@ using WaterMix.Workspace.Studies;
 
 namespace WaterMix.Web.State;
 
-/// <summary>A line of the list of studies, in words.</summary>
-/// <param name="Id">The study.</param>
-/// <param name="Name">Its name.</param>
-/// <param name="Samples">Number of samples.</param>
-/// <param name="Runs">Number of runs.</param>
-/// <param name="Changed">When anything in it last changed.</param>
-public sealed record StudyLine(Guid Id, string Name, string Samples, string Runs, string Changed);
-
 /// <summary>What the page of studies remembers: the list, what is being named, what can be undone.</summary>
 /// <param name="studies">The studies.</param>
 /// <param name="clock">The time zone in which times are shown.</param>

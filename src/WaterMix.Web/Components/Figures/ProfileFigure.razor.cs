@@ -33,4 +33,21 @@ public sealed partial class ProfileFigure
     /// <summary>What is said of a row, such as <see cref="FigureColumns.NameOf"/>.</summary>
     [Parameter]
     public Func<int, string>? Describe { get; set; }
+
+    private IReadOnlyList<ProfilePlot> _plots = [];
+    private Func<FigurePoint, string>? _describe;
+    private (double[] Pressure, IReadOnlyList<ProfileSeries> Series)? _made;
+
+    /// <inheritdoc/>
+    protected override void OnParametersSet()
+    {
+        _describe = Describe is null ? null : point => Describe(point.Row);
+        if (_made is { } made && ReferenceEquals(made.Pressure, Pressure) && ReferenceEquals(made.Series, Series))
+        {
+            return;
+        }
+
+        _made = (Pressure, Series);
+        _plots = ProfilePlot.Of(Pressure, Series);
+    }
 }

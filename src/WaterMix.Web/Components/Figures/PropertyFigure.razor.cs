@@ -56,4 +56,26 @@ public sealed partial class PropertyFigure
     /// <summary>What is said of a row, such as <see cref="FigureColumns.NameOf"/>.</summary>
     [Parameter]
     public Func<int, string>? Describe { get; set; }
+
+    private IReadOnlyList<FigureLayer> _layers = [];
+    private Func<FigurePoint, string>? _describe;
+    private string _caption = "";
+    private (PointLayer Samples, IReadOnlyList<PropertySource> Sources, IReadOnlyList<ProcessDirection> Processes, bool Draggable)? _made;
+
+    /// <inheritdoc/>
+    protected override void OnParametersSet()
+    {
+        _describe = Describe is null ? null : point => Describe(point.Row);
+        if (_made is not { } made
+            || !ReferenceEquals(made.Samples, Samples)
+            || made.Draggable != Draggable
+            || !made.Sources.SequenceEqual(Sources)
+            || !made.Processes.SequenceEqual(Processes))
+        {
+            _made = (Samples, Sources, Processes, Draggable);
+            PropertyPicture picture = PropertyPicture.Of(Samples, Sources, Processes, Draggable);
+            _layers = picture.Layers;
+            _caption = picture.Sentence;
+        }
+    }
 }

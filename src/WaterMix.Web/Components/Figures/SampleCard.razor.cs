@@ -1,3 +1,4 @@
+using System.Globalization;
 using Microsoft.AspNetCore.Components;
 using WaterMix.Web.State.Figures;
 
@@ -13,4 +14,18 @@ public sealed partial class SampleCard
     /// <summary>The card was closed; without a handler it has no close button.</summary>
     [Parameter]
     public EventCallback OnClose { get; set; }
+
+    private IReadOnlyList<CardBar> _bars = [];
+
+    /// <inheritdoc/>
+    protected override void OnParametersSet() => _bars = [.. Text.Shares.Select(CardBar.Of)];
+
+    private sealed record CardBar(CardShare Share, string Width, string Light, string Dark)
+    {
+        public static CardBar Of(CardShare share)
+        {
+            (string light, string dark) = FigureColour.InThemes(share.Colour);
+            return new CardBar(share, (100 * share.Fraction).ToString("0.##", CultureInfo.InvariantCulture), light, dark);
+        }
+    }
 }

@@ -1,4 +1,5 @@
 using Microsoft.AspNetCore.Components;
+using Microsoft.JSInterop;
 using WaterMix.Web.State.Figures;
 
 namespace WaterMix.Web.Components.Figures;
@@ -56,4 +57,152 @@ public sealed partial class ScatterFigure
     /// <summary>True where the legend is left out because something near says the same.</summary>
     [Parameter]
     public bool HideLegend { get; set; }
+
+    private readonly string _helpId = "figure-help-" + Guid.NewGuid().ToString("N");
+    private DotNetObjectReference<ScatterFigure>? _self;
+    private IJSObjectReference? _plot;
+    private ElementReference _host;
+    private bool _movesByDragging;
+    private Drawn? _drawn;
+
+    /// <summary>What is said of a point: its description and its values at the axes.</summary>
+    /// <param name="layer">The layer's id.</param>
+    /// <param name="point">Index of the point in its layer.</param>
+    /// <returns>The text; empty where the layer is gone.</returns>
+    [JSInvokable]
+    public string Say(string layer, int point) => PointLayer(layer, point) is { } points ? TextOf(points, point) : "";
+
+    /// <summary>A point was chosen.</summary>
+    /// <param name="layer">The layer's id.</param>
+    /// <param name="point">Index of the point in its layer.</param>
+    [JSInvokable]
+    public Task Pick(string layer, int point) =>
+        PointLayer(layer, point) is { } points
+            ? InvokeAsync(() => OnSelect.InvokeAsync(new FigurePoint(points.Id, points.RowOf(point))))
+            : Task.CompletedTask;
+
+    /// <summary>The point that an arrow key steps to.</summary>
+    /// <param name="layer">The id of the layer to step from; empty at first.</param>
+    /// <param name="point">Index of the point to step from; -1 at first.</param>
+    /// <param name="direction">Which way.</param>
+    /// <param name="left">The x at the left edge of the view.</param>
+    /// <param name="right">The x at the right edge.</param>
+    /// <param name="bottom">The y at the bottom edge.</param>
+    /// <param name="top">The y at the top edge.</param>
+    /// <returns>The point and what is said of it; null where there is none in view.</returns>
+    [JSInvokable]
+    public FigureStep? Step(string layer, int point, StepDirection direction, double left, double right, double bottom, double top)
+    {
+        PointLayer? points = PointLayer(layer, point) ?? Layers.OfType<PointLayer>().LastOrDefault(l => l.CanSelect);
+        if (points is null)
+        {
+            return null;
+        }
+
+        int from = points.Id == layer && point < points.X.Length ? point : -1;
+        int next = PointStepper.Next(points.X, points.Y, from, direction, left, right, bottom, top);
+        return next < 0 ? null : new FigureStep(points.Id, next, TextOf(points, next));
+    }
+
+    /// <summary>A mark was moved.</summary>
+    /// <param name="layer">The layer's id.</param>
+    /// <param name="mark">The mark's id.</param>
+    /// <param name="x">Where it stands now.</param>
+    /// <param name="y">Where it stands now.</param>
+    /// <param name="released">False while the pointer still moves it.</param>
+    [JSInvokable]
+    public Task Move(string layer, string mark, double x, double y, bool released) =>
+        InvokeAsync(() => OnMarkMoved.InvokeAsync(new MarkMove(layer, mark, x, y, released)));
+
+    /// <inheritdoc/>
+    public async ValueTask DisposeAsync()
+    {
+        _self?.Dispose();
+        await FigureModule.DisposeAsync(_plot);
+    }
+
+    /// <inheritdoc/>
+    protected override async Task OnAfterRenderAsync(bool firstRender)
+    {
+        if (firstRender)
+        {
+            _self = DotNetObjectReference.Create(this);
+            _plot = await FigureModule.CreateAsync(JS, "figure.js", _host, _self);
+        }
+
+        if (_plot is null)
+        {
+            return;
+        }
+
+        var now = new Drawn(X, Y, Layers, TopTicks, SelectedRow);
+        if (_drawn is null || !_drawn.HasSamePicture(now))
+        {
+            IReadOnlyList<FigureLayer> before = _drawn?.Layers ?? [];
+            _drawn = now;
+            var drawing = new FigureDrawing();
+            object[] layers = [.. now.Layers.Select(l => before.Any(b => ReferenceEquals(b, l)) ? new { id = l.Id, keep = true } : drawing.Layer(l))];
+            var picture = new
+            {
+                x = FigureDrawing.Axis(X, FigureRanges.X(X, Layers)),
+                y = FigureDrawing.Axis(Y, FigureRanges.Y(Y, Layers)),
+                topTicks = TopTicks.Select(t => new { at = t.At, label = t.Label }),
+                layers,
+                selected = Selected(),
+            };
+            await _plot.InvokeVoidAsync("draw", picture, drawing.Bytes);
+        }
+        else if (_drawn.SelectedRow != now.SelectedRow)
+        {
+            _drawn = now;
+            await _plot.InvokeVoidAsync("select", Selected());
+        }
+    }
+
+    private string HeightClass => Height switch
+    {
+        FigureHeight.Small => "is-small",
+        FigureHeight.Tall => "is-tall",
+        _ => "is-hero",
+    };
+
+    private object[] Selected() =>
+        SelectedRow is not { } row
+            ? []
+            : [.. Layers.OfType<PointLayer>().Where(l => l.CanSelect).Select(l => (l.Id, Point: PointOf(l, row))).Where(p => p.Point >= 0).Select(p => new { layer = p.Id, point = p.Point })];
+
+    private static int PointOf(PointLayer layer, int row) =>
+        layer.Rows is null ? (row < layer.X.Length ? row : -1) : Array.IndexOf(layer.Rows, row);
+
+    private PointLayer? PointLayer(string id, int point) =>
+        Layers.OfType<PointLayer>().FirstOrDefault(l => l.Id == id && point >= 0 && point < l.X.Length);
+
+    private string TextOf(PointLayer layer, int point)
+    {
+        string values = $"{X.Title} {FigureText.WithUnit(layer.X[point], X.Unit)}, {Y.Title} {FigureText.WithUnit(layer.Y[point], Y.Unit)}";
+        string colour = ColourText.Of(layer.Colour, point);
+        string described = Describe is null ? layer.Name : Describe(new FigurePoint(layer.Id, layer.RowOf(point)));
+        return FigureText.Sentence(string.Join("; ", new[] { described, values, colour }.Where(t => t.Length > 0)));
+    }
+
+    private Task ZoomAsync(double factor) => _plot?.InvokeVoidAsync("zoom", factor).AsTask() ?? Task.CompletedTask;
+
+    private Task ResetAsync() => _plot?.InvokeVoidAsync("reset").AsTask() ?? Task.CompletedTask;
+
+    private Task ToggleDraggingAsync()
+    {
+        _movesByDragging = !_movesByDragging;
+        return _plot?.InvokeVoidAsync("moveByDragging", _movesByDragging).AsTask() ?? Task.CompletedTask;
+    }
+
+    /// <summary>What was last sent to the browser.</summary>
+    private sealed record Drawn(FigureAxis X, FigureAxis Y, IReadOnlyList<FigureLayer> Layers, IReadOnlyList<FigureTick> TopTicks, int? SelectedRow)
+    {
+        public bool HasSamePicture(Drawn other) =>
+            X == other.X
+            && Y == other.Y
+            && ReferenceEquals(TopTicks, other.TopTicks)
+            && Layers.Count == other.Layers.Count
+            && Layers.Zip(other.Layers).All(pair => ReferenceEquals(pair.First, pair.Second));
+    }
 }

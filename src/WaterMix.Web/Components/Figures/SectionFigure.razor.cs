@@ -1,4 +1,5 @@
 using Microsoft.AspNetCore.Components;
+using Microsoft.JSInterop;
 using WaterMix.Web.State.Figures;
 
 namespace WaterMix.Web.Components.Figures;
@@ -43,4 +44,94 @@ public sealed partial class SectionFigure
     /// <summary>What is said of a row, such as <see cref="FigureColumns.NameOf"/>.</summary>
     [Parameter]
     public Func<int, string>? Describe { get; set; }
+
+    private const string SamplesLayer = "samples";
+
+    private DotNetObjectReference<SectionFigure>? _self;
+    private IJSObjectReference? _panels;
+    private ElementReference _root;
+    private IReadOnlyList<FigureLayer> _layers = [];
+    private Func<FigurePoint, string>? _describe;
+    private (SectionColumns Section, SectionPanel Panel)? _hero;
+    private (SectionColumns Section, IReadOnlyList<SectionPanel> Panels)? _drawn;
+    private int? _drawnRow;
+
+    private SectionPanel Current => Panels.FirstOrDefault(p => p.Id == Enlarged) ?? Panels[0];
+
+    private string HeroTitle => Panels.Count > 1 ? $"{Title}: {Current.Title}" : Title;
+
+    /// <summary>A point of a small panel was chosen.</summary>
+    /// <param name="point">Index of the point in the section.</param>
+    [JSInvokable]
+    public Task PickPoint(int point) =>
+        point >= 0 && point < Section.Rows.Length ? InvokeAsync(() => OnSelect.InvokeAsync(Section.Rows[point])) : Task.CompletedTask;
+
+    /// <inheritdoc/>
+    public async ValueTask DisposeAsync()
+    {
+        _self?.Dispose();
+        await FigureModule.DisposeAsync(_panels);
+    }
+
+    /// <inheritdoc/>
+    protected override void OnParametersSet()
+    {
+        _describe = Describe is null ? null : point => Describe(point.Row);
+        if (_hero is { } hero && ReferenceEquals(hero.Section, Section) && hero.Panel == Current)
+        {
+            return;
+        }
+
+        _hero = (Section, Current);
+        var points = new PointLayer(SamplesLayer, "", Section.X, Section.Y, Current.Colour) { Rows = Section.Rows, Size = Section.X.Length > 5000 ? 5 : 8 };
+        _layers = Section.Bottom is null ? [points] : [Section.Bottom, points];
+    }
+
+    /// <inheritdoc/>
+    protected override async Task OnAfterRenderAsync(bool firstRender)
+    {
+        if (Panels.Count < 2)
+        {
+            return;
+        }
+
+        if (_panels is null)
+        {
+            _self = DotNetObjectReference.Create(this);
+            _panels = await FigureModule.CreateAsync(JS, "panels.js", _root, _self);
+        }
+
+        if (_drawn is not { } drawn || !ReferenceEquals(drawn.Section, Section) || !drawn.Panels.SequenceEqual(Panels))
+        {
+            _drawn = (Section, Panels);
+            _drawnRow = SelectedRow;
+            await DrawPanelsAsync(_panels);
+        }
+        else if (_drawnRow != SelectedRow)
+        {
+            _drawnRow = SelectedRow;
+            await _panels.InvokeVoidAsync("select", SelectedPoint());
+        }
+    }
+
+    private async Task DrawPanelsAsync(IJSObjectReference panels)
+    {
+        var drawing = new FigureDrawing();
+        var picture = new
+        {
+            xAxis = FigureDrawing.Axis(Section.XAxis, FigureRanges.X(Section.XAxis, _layers)),
+            yAxis = FigureDrawing.Axis(Section.YAxis, FigureRanges.Y(Section.YAxis, _layers)),
+            n = Section.X.Length,
+            x = drawing.Add(Section.X),
+            y = drawing.Add(Section.Y),
+            size = Section.X.Length > 5000 ? 3 : 4,
+            floor = Section.Bottom is null ? null : drawing.Layer(Section.Bottom),
+            panels = Panels.Select(p => new { id = p.Id, colour = drawing.Colour(p.Colour, PointShape.Circle) }).ToArray(),
+            selected = SelectedPoint(),
+        };
+        await panels.InvokeVoidAsync("draw", picture, drawing.Bytes);
+    }
+
+    private int? SelectedPoint() =>
+        SelectedRow is { } row && Array.IndexOf(Section.Rows, row) is >= 0 and var point ? point : null;
 }

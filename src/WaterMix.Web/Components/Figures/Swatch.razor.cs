@@ -1,3 +1,4 @@
+using System.Globalization;
 using Microsoft.AspNetCore.Components;
 using WaterMix.Web.State.Figures;
 
@@ -17,4 +18,14 @@ public sealed partial class Swatch
     /// <summary>How strong the colour is over the sheet's, 0 to 1.</summary>
     [Parameter]
     public double Strength { get; set; } = 1;
+
+    private string _light = "";
+    private string _dark = "";
+
+    private string StrengthText => Strength.ToString("0.###", CultureInfo.InvariantCulture);
+
+    private string Path => ShapePath.Of(Shape, 5);
+
+    /// <inheritdoc/>
+    protected override void OnParametersSet() => (_light, _dark) = FigureColour.InThemes(Colour);
 }
