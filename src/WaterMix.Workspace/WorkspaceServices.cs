@@ -1,6 +1,7 @@
 using Microsoft.Extensions.DependencyInjection;
 using Microsoft.Extensions.DependencyInjection.Extensions;
 using WaterMix.Workspace.Cruises;
+using WaterMix.Workspace.Runs;
 using WaterMix.Workspace.Storage;
 using WaterMix.Workspace.Studies;
 
@@ -10,7 +11,7 @@ namespace WaterMix.Workspace;
 public static class WorkspaceServices
 {
     /// <summary>
-    /// Adds <see cref="IStudies"/> and <see cref="ICruises"/> over one data folder. The folder is opened when the app starts; a folder in use ends
+    /// Adds <see cref="IStudies"/>, <see cref="ICruises"/>, <see cref="IRuns"/> and <see cref="LiveSolver"/> over one data folder. The folder is opened when the app starts; a folder in use ends
     /// the start with a <see cref="DataFolderInUseException"/>.
     /// </summary>
     /// <param name="services">The app's services, with logging.</param>
@@ -27,8 +28,20 @@ public static class WorkspaceServices
         services.AddSingleton(provider => new ByteCache(provider.GetRequiredService<WorkspaceOptions>().CacheBytes));
         services.AddSingleton<Uploads>();
         services.AddSingleton<SampleStore>();
+        services.AddSingleton<CruiseReadings>();
+        services.AddSingleton<RunStore>();
+        services.AddSingleton<SolverPool>();
+        services.AddSingleton<RunWorker>();
         services.AddSingleton<IStudies, StudyService>();
         services.AddSingleton<ICruises, CruiseService>();
+        services.AddSingleton<IRuns, RunService>();
+        services.AddSingleton(provider => new LiveSolver(
+            provider.GetRequiredService<WorkspaceDatabase>(),
+            provider.GetRequiredService<CruiseReadings>(),
+            provider.GetRequiredService<SampleStore>(),
+            provider.GetRequiredService<SolverPool>(),
+            provider.GetRequiredService<WorkspaceOptions>()));
+        services.AddHostedService(provider => provider.GetRequiredService<RunWorker>());
         return services;
     }
 }

@@ -2,6 +2,7 @@ using Microsoft.Extensions.DependencyInjection;
 using Microsoft.Extensions.Hosting;
 using WaterMix.Testing;
 using WaterMix.Workspace.Cruises;
+using WaterMix.Workspace.Runs;
 using WaterMix.Workspace.Studies;
 
 namespace WaterMix.Workspace.Tests;
@@ -19,6 +20,8 @@ internal sealed class OpenWorkspace : IAsyncDisposable
     public IStudies Studies => Get<IStudies>();
 
     public ICruises Cruises => Get<ICruises>();
+
+    public IRuns Runs => Get<IRuns>();
 
     public static async Task<OpenWorkspace> AtAsync(string folder, WorkspaceOptions? options = null, TimeProvider? clock = null)
     {
@@ -60,6 +63,29 @@ internal sealed class OpenWorkspace : IAsyncDisposable
             study, await UploadAsync(files), cruiseName, new Formats.Reading.ReadingOptions(), null, TestContext.Current.CancellationToken);
         Assert.True(cruise is not null, string.Join("\n", trial.Report.Findings));
         return cruise;
+    }
+
+    /// <summary>Waits until a run has ended, and gives it.</summary>
+    public async Task<Run> EndOfAsync(Guid run)
+    {
+        while (true)
+        {
+            Run found = (await Runs.FindAsync(run))!;
+            if (found.State is not (RunState.Waiting or RunState.Running))
+            {
+                return found;
+            }
+
+            await Task.Delay(5, TestContext.Current.CancellationToken);
+        }
+    }
+
+    /// <summary>The results of a run as CSV.</summary>
+    public async Task<byte[]> CsvAsync(Guid run)
+    {
+        using var stream = new MemoryStream();
+        await Runs.WriteCsvAsync(run, stream, TestContext.Current.CancellationToken);
+        return stream.ToArray();
     }
 
     public async ValueTask DisposeAsync()

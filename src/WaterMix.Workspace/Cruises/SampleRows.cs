@@ -15,17 +15,15 @@ internal static class SampleRows
         [.. table.Columns.Select(c => Slice(c, from, count))],
         table.HasBottleFlags ? table.BottleFlags.Slice(from, count).ToArray() : null);
 
-    /// <summary>Some rows, only the quantity columns: what solving needs.</summary>
+    /// <summary>Some rows of the columns that a model can use: no names, and of each quantity its main column.</summary>
     /// <param name="table">The samples.</param>
     /// <param name="from">Index of the first.</param>
     /// <param name="count">How many.</param>
-    /// <param name="quantities">Ids of the quantities.</param>
-    public static SampleTable Slice(SampleTable table, int from, int count, IReadOnlySet<string> quantities) => new(
-        count,
-        [],
-        [.. table.Columns.Where(c => quantities.Contains(c.Id)).Select(c => Slice(c, from, count))]);
+    public static SampleTable ForSolving(SampleTable table, int from, int count) =>
+        new(count, [], [.. table.Columns.Where(c => c.Suffix.Length == 0).Select(c => Slice(c, from, count))]);
 
-    private static IdentityColumn Slice(IdentityColumn column, int from, int count)
+    /// <summary>Some rows of an identity column.</summary>
+    public static IdentityColumn Slice(IdentityColumn column, int from, int count)
     {
         var codes = new int[count];
         var names = new List<string>();
@@ -50,7 +48,8 @@ internal static class SampleRows
         return new IdentityColumn(column.Id, codes, [.. names]);
     }
 
-    private static SampleColumn Slice(SampleColumn column, int from, int count)
+    /// <summary>Some rows of a quantity column.</summary>
+    public static SampleColumn Slice(SampleColumn column, int from, int count)
     {
         ValueOrigin[]? origins = null;
         if (column.IsMerged)
