@@ -19,7 +19,7 @@ public static class FilterWords
         List<string> parts = [];
         if (filter.Status is { } status)
         {
-            parts.Add(StatusText.Short(status));
+            parts.Add(StatusText.Of(status));
         }
 
         if (filter.Layer is not null)

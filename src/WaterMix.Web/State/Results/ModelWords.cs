@@ -22,7 +22,7 @@ public static class ModelWords
 
     /// <summary>The first characters of a hash, as people quote it.</summary>
     /// <param name="hash">A hash in hexadecimal digits.</param>
-    public static string Short(string hash)
+    public static string HashStart(string hash)
     {
         ArgumentNullException.ThrowIfNull(hash);
         return hash.Length > 8 ? hash[..8] : hash;

@@ -21,7 +21,7 @@ internal static class ResultTableColumns
         Values(results, Quantity.Longitude, 3),
         Values(results, Quantity.Pressure, 0),
         ResultColumn.OfTexts("layer", "Layer", results.RowCount, row => results.Layer[row] < 0 ? "" : results.LayerIds[results.Layer[row]]),
-        ResultColumn.OfTexts("status", "Status", results.RowCount, row => StatusText.Short(results.Status[row])),
+        ResultColumn.OfTexts("status", "Status", results.RowCount, row => StatusText.Of(results.Status[row])),
         ResultColumn.OfNumbers("tracers", "Tracers used", "", results.TracerCount, 0),
         .. results.Sources.Select((source, index) => Fraction(results, source, index)),
         ResultColumn.OfNumbers("fraction_sum", "Sum", "", results.FractionSum, 3),

@@ -67,8 +67,13 @@ public sealed class ResultsMaker(RunResults results)
     private StationProfile? ProfileOf(ResultsView view)
     {
         IReadOnlyList<MapStation> stations = results.Columns.Stations;
+        if (stations.Count == 0)
+        {
+            return null;
+        }
+
         int sampled = view.Sample is { } sample && sample < results.RowCount ? results.Columns.StationOf[sample] : -1;
-        MapStation? station = stations.FirstOrDefault(s => s.Id == view.Station) ?? (sampled >= 0 ? stations[sampled] : stations.FirstOrDefault());
-        return station is null ? null : _profile.Get(station.Id, () => StationProfile.Of(results, station));
+        MapStation station = stations.FirstOrDefault(s => s.Id == view.Station) ?? stations[Math.Max(sampled, 0)];
+        return _profile.Get(station.Id, () => StationProfile.Of(results, station));
     }
 }

@@ -36,14 +36,14 @@ public sealed record ResultsShown(
     public SampleCardText? Card { get; init; }
 
     /// <summary>The enlarged panel's id: the view's where it is there, otherwise the first; null without panels.</summary>
-    public string? Enlarged => (Panels.FirstOrDefault(p => p.Id == View.Enlarged) ?? Panels.FirstOrDefault())?.Id;
+    public string? Enlarged => Panels.Count == 0 ? null : (Panels.FirstOrDefault(p => p.Id == View.Enlarged) ?? Panels[0]).Id;
 
     /// <summary>The line at the foot of the page.</summary>
     public IReadOnlyList<string> StatusLine =>
     [
         RowCount == Results.RowCount ? PlainText.Count(RowCount, "sample") : $"{PlainText.Count(RowCount)} of {PlainText.Count(Results.RowCount, "sample")} shown",
-        .. Statuses.Select(s => $"{PlainText.Count(s.Count)} {StatusText.Short(s.Status)}"),
-        $"model {ModelWords.Short(Results.Run.ModelHash)}",
+        .. Statuses.Select(s => $"{PlainText.Count(s.Count)} {StatusText.Of(s.Status)}"),
+        $"model {ModelWords.HashStart(Results.Run.ModelHash)}",
         $"set v{PlainText.Count(Results.Model.EndMembers.Version)}",
     ];
 }

@@ -38,7 +38,7 @@ internal static class SectionPanels
         // The most wanted first, as in the legend.
         SolveStatus[] present = [.. results.Status.Distinct().OrderDescending()];
         int[] codes = [.. At(results.Status, rows).Select(s => Array.IndexOf(present, s))];
-        return new CategoryColour("Status", codes, [.. present.Select(s => new FigureCategory(StatusText.Short(s), StatusColours[(int)s], ShapeOf(s)))]);
+        return new CategoryColour("Status", codes, [.. present.Select(s => new FigureCategory(StatusText.Of(s), StatusColours[(int)s], ShapeOf(s)))]);
     }
 
     /// <summary>The entries of some rows; the array itself for all.</summary>

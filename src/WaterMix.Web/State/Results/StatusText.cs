@@ -7,7 +7,7 @@ public static class StatusText
 {
     /// <summary>A status such as <c>too few tracers</c>.</summary>
     /// <param name="status">The status.</param>
-    public static string Short(SolveStatus status) => status switch
+    public static string Of(SolveStatus status) => status switch
     {
         SolveStatus.BadInput => "impossible value",
         SolveStatus.OutsideLayers => "outside the layers",
