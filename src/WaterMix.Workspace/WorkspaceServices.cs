@@ -42,6 +42,8 @@ public static class WorkspaceServices
             provider.GetRequiredService<SolverPool>(),
             provider.GetRequiredService<WorkspaceOptions>()));
         services.AddHostedService(provider => provider.GetRequiredService<RunWorker>());
+        services.AddSingleton<Housekeeping>();
+        services.AddHostedService(provider => provider.GetRequiredService<Housekeeping>());
         return services;
     }
 }

@@ -60,11 +60,8 @@ internal sealed partial class SampleStore(DataFolder folder, ByteCache cache)
             hash = $"{hash}-{own[..16]}";
         }
 
-        if (!File.Exists(PathOf(hash)))
-        {
-            File.Move(file.Path, PathOf(hash), overwrite: true);
-        }
-
+        // Over the same bytes where they are there already: the file is then young, and is not cleared away before a row names it.
+        File.Move(file.Path, PathOf(hash), overwrite: true);
         return hash;
     }
 

@@ -1,0 +1,257 @@
+using System.Diagnostics;
+using System.Security.Cryptography;
+using WaterMix.Core.EndMembers;
+using WaterMix.Core.Mixing;
+using WaterMix.Core.Samples;
+using WaterMix.Workspace.Cruises;
+using WaterMix.Workspace.Runs;
+using WaterMix.Workspace.Studies;
+
+namespace WaterMix.Workspace.Tests.Runs;
+
+public class RunServiceTests
+{
+    private static readonly byte[] Bottles = OpenWorkspace.Sample("halcyon_hy1.csv");
+
+    [Fact]
+    public async Task Start_TheInventedCruise_EndsWithTheSolversNumbers()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder);
+        Guid study = await HalcyonStudyAsync(workspace);
+        var progress = new List<Guid>();
+        workspace.Runs.Progressed += progress.Add;
+
+        Guid id = await workspace.Runs.StartAsync(study, " first ");
+        Run run = await workspace.EndOfAsync(id);
+
+        Assert.Equal(("first", RunState.Finished, 832L, 832L), (run.Name, run.State, run.Done, run.Total));
+        CruiseResult result = Assert.Single(await workspace.Runs.ResultsAsync(id));
+        SampleTable samples = await workspace.Cruises.SamplesAsync(result.SamplesHash);
+        MixingResult direct = MixingSolver.Solve(PreparedModel.From(Halcyon.Model), samples, new SolveOptions { Threads = 1 }).Result;
+        AssertSame(direct, result.Result);
+        Assert.Equal(direct.Status.GroupBy(s => s).ToDictionary(g => g.Key, g => g.LongCount()), run.Statuses);
+        Assert.All(progress, p => Assert.Equal(id, p));
+        Assert.NotEmpty(progress);
+        Assert.Same(result.Result, (await workspace.Runs.ResultsAsync(id))[0].Result);
+        Assert.False(Directory.Exists(Path.Combine(Directory.GetDirectories(scratch.Path("runs")).Single(), "chunks")));
+    }
+
+    [Fact]
+    public async Task Start_ThenEditTheDraft_LeavesTheRunAsItWas()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder);
+        Guid study = await HalcyonStudyAsync(workspace);
+        Guid first = await workspace.Runs.StartAsync(study, "first");
+        await workspace.EndOfAsync(first);
+
+        await workspace.Studies.SaveDraftAsync(study, Halcyon.Simple, 1);
+        Guid second = await workspace.Runs.StartAsync(study, "second");
+        await workspace.EndOfAsync(second);
+        await workspace.Runs.RenameAsync(second, "simple");
+
+        Study found = (await workspace.Studies.FindAsync(study))!;
+        Assert.Equal(["simple", "first"], found.Runs.Select(r => r.Name));
+        Assert.Equal([Halcyon.Simple, Halcyon.Model], found.Runs.Select(r => r.Model));
+        Assert.NotEqual(found.Runs[0].ModelHash, found.Runs[1].ModelHash);
+    }
+
+    [Fact]
+    public async Task Start_WithoutSamplesOrWithAModelThatHasErrors_SaysWhatToDo()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder);
+        Guid study = await workspace.Studies.CreateAsync("a");
+
+        InvalidOperationException incomplete = await Assert.ThrowsAsync<InvalidOperationException>(() => workspace.Runs.StartAsync(study, "r"));
+        await workspace.Studies.SaveDraftAsync(study, Halcyon.Model, 0);
+        InvalidOperationException empty = await Assert.ThrowsAsync<InvalidOperationException>(() => workspace.Runs.StartAsync(study, "r"));
+        await workspace.KeepAsync(study, "c", ("a.csv", "latitude,longitude,pressure,oxygen\n1,2,3,200\n"u8.ToArray()));
+        InvalidOperationException columns = await Assert.ThrowsAsync<InvalidOperationException>(() => workspace.Runs.StartAsync(study, "r"));
+
+        Assert.StartsWith("The model cannot be solved yet: error: /endMembers/endMembers", incomplete.Message, StringComparison.Ordinal);
+        Assert.Equal("There are no samples in this study. Upload a cruise first.", empty.Message);
+        Assert.StartsWith("No cruise has a column of nitrate, phosphate, potential_temperature, practical_salinity, silicate", columns.Message, StringComparison.Ordinal);
+        Assert.Empty((await workspace.Studies.FindAsync(study))!.Runs);
+    }
+
+    [Fact]
+    public async Task Start_WithOneTracerWithoutAnyUsableValue_FailsAndNamesIt()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder);
+        Guid study = await workspace.Studies.CreateAsync("a");
+        await workspace.Studies.SaveDraftAsync(study, Halcyon.Model with { Tracers = ["practical_salinity", "oxygen"], Processes = [], Layers = [] }, 0);
+        await workspace.KeepAsync(study, "c", ("a.csv", "latitude,longitude,pressure,practical_salinity,oxygen,oxygen_flag\n1,2,3,35,200,4\n"u8.ToArray()));
+
+        Guid id = await workspace.Runs.StartAsync(study, "r");
+        Run run = await workspace.EndOfAsync(id);
+
+        Assert.Equal(RunState.Failed, run.State);
+        Assert.StartsWith("No sample has a usable value of oxygen,", run.Problem, StringComparison.Ordinal);
+        await Assert.ThrowsAsync<InvalidOperationException>(() => workspace.Runs.ResultsAsync(id));
+        await Assert.ThrowsAsync<InvalidOperationException>(() => workspace.CsvAsync(id));
+    }
+
+    [Fact]
+    public async Task Start_WithTheSamplesFileGone_FailsAndTheWorkerGoesOn()
+    {
+        using var scratch = new Scratch();
+        Guid study;
+        await using (OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder))
+        {
+            study = await HalcyonStudyAsync(workspace);
+        }
+
+        string file = Directory.GetFiles(scratch.Path("samples")).Single();
+        File.Move(file, file + ".away");
+        await using OpenWorkspace again = await OpenWorkspace.AtAsync(scratch.Folder);
+        await Assert.ThrowsAsync<InvalidDataException>(() => again.Runs.StartAsync(study, "r"));
+        File.Move(file + ".away", file);
+
+        Assert.Equal(RunState.Finished, (await again.EndOfAsync(await again.Runs.StartAsync(study, "r"))).State);
+    }
+
+    // One row to a chunk, so that there is a middle to stop in.
+    [Fact]
+    public async Task Restart_InTheMiddle_GoesOnAndEndsWithTheSameBytes()
+    {
+        using var scratch = new Scratch();
+        var small = new WorkspaceOptions { ChunkRows = 2 };
+        Guid whole;
+        Guid interrupted;
+        await using (OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder, small))
+        {
+            Guid study = await HalcyonStudyAsync(workspace);
+            whole = await workspace.Runs.StartAsync(study, "whole");
+            await workspace.EndOfAsync(whole);
+            interrupted = await workspace.Runs.StartAsync(study, "interrupted");
+            await ReachedAsync(workspace, interrupted, 20);
+        }
+
+        long before;
+        await using (OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder, small))
+        {
+            Run run = (await workspace.Runs.FindAsync(interrupted))!;
+            before = run.Done;
+            Assert.InRange(before, 20, 831);
+            Assert.True(run.State is RunState.Waiting or RunState.Running);
+            Assert.Equal(RunState.Finished, (await workspace.EndOfAsync(interrupted)).State);
+            Assert.Equal(832, (await workspace.Runs.FindAsync(interrupted))!.Done);
+            Assert.Equal(await workspace.CsvAsync(whole), await workspace.CsvAsync(interrupted));
+        }
+
+        byte[][] hashes = [.. Directory.GetFiles(scratch.Path("runs"), "*.parquet", SearchOption.AllDirectories).Select(f => SHA256.HashData(File.ReadAllBytes(f)))];
+        Assert.Equal(2, hashes.Length);
+        Assert.Equal(hashes[0], hashes[1]);
+    }
+
+    [Fact]
+    public async Task Cancel_AtWork_StopsWithinATenthOfASecondAndStaysCancelled()
+    {
+        using var scratch = new Scratch();
+        var small = new WorkspaceOptions { ChunkRows = 1 };
+        Guid id;
+        await using (OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder, small))
+        {
+            Guid study = await HalcyonStudyAsync(workspace);
+            id = await workspace.Runs.StartAsync(study, "r");
+            await ReachedAsync(workspace, id, 5);
+
+            var clock = Stopwatch.StartNew();
+            await workspace.Runs.CancelAsync(id);
+            Run run = (await workspace.Runs.FindAsync(id))!;
+            Assert.InRange(clock.ElapsedMilliseconds, 0, 100);
+
+            Assert.Equal(RunState.Cancelled, run.State);
+            Assert.Equal(RunState.Finished, (await workspace.EndOfAsync(await workspace.Runs.StartAsync(study, "next"))).State);
+            Assert.Equal(run.Done, (await workspace.Runs.FindAsync(id))!.Done);
+        }
+
+        await using OpenWorkspace again = await OpenWorkspace.AtAsync(scratch.Folder);
+        await again.Runs.CancelAsync(id);
+        Assert.Equal(RunState.Cancelled, (await again.Runs.FindAsync(id))!.State);
+    }
+
+    [Fact]
+    public async Task Start_TwoRunsAtOnce_TakeTurns()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder, new WorkspaceOptions { ChunkRows = 4 });
+        Guid study = await HalcyonStudyAsync(workspace);
+
+        Guid first = await workspace.Runs.StartAsync(study, "first");
+        Guid second = await workspace.Runs.StartAsync(study, "second");
+        await ReachedAsync(workspace, second, 40);
+
+        Assert.InRange((await workspace.Runs.FindAsync(first))!.Done, 40, 831);
+        Assert.Equal(RunState.Finished, (await workspace.EndOfAsync(first)).State);
+        Assert.Equal(RunState.Finished, (await workspace.EndOfAsync(second)).State);
+    }
+
+    [Fact]
+    public async Task Duplicate_AStudyWithRuns_ShowsTheSameResults()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder);
+        Guid study = await HalcyonStudyAsync(workspace);
+        Guid run = await workspace.Runs.StartAsync(study, "r");
+        await workspace.EndOfAsync(run);
+
+        Study copy = (await workspace.Studies.FindAsync(await workspace.Studies.DuplicateAsync(study, "copy")))!;
+
+        Run copied = Assert.Single(copy.Runs);
+        Assert.NotEqual(run, copied.Id);
+        Assert.Equal(await workspace.CsvAsync(run), await workspace.CsvAsync(copied.Id));
+        Assert.Equal(copy.Cruises[0].Id, (await workspace.Runs.ResultsAsync(copied.Id))[0].Cruise);
+    }
+
+    [Fact]
+    public async Task Start_ACruisesErrorBesideAFullCovariance_IsRefused()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder);
+        Guid study = await HalcyonStudyAsync(workspace);
+        var fit = (GeneralisedLeastSquares)Halcyon.Model.Fit;
+        await workspace.Studies.SaveDraftAsync(study, Halcyon.Model with { Fit = fit with { MeasurementCovariance = new TracerMatrix(["oxygen"], [[1]]) } }, 1);
+        Cruise cruise = (await workspace.Studies.FindAsync(study))!.Cruises[0];
+        await workspace.Cruises.SetMeasurementSdAsync(cruise.Id, new Dictionary<string, MeasurementError> { ["oxygen"] = new(1) });
+
+        InvalidOperationException refusal = await Assert.ThrowsAsync<InvalidOperationException>(() => workspace.Runs.StartAsync(study, "r"));
+
+        Assert.Equal("The cruise c has a measurement error of its own for oxygen, and the model a full covariance. Take one of the two away.", refusal.Message);
+    }
+
+    internal static async Task<Guid> HalcyonStudyAsync(OpenWorkspace workspace)
+    {
+        Guid study = await workspace.Studies.CreateAsync("a");
+        await workspace.Studies.SaveDraftAsync(study, Halcyon.Model, 0);
+        await workspace.KeepAsync(study, "c", ("halcyon_hy1.csv", Bottles));
+        return study;
+    }
+
+    internal static void AssertSame(MixingResult expected, MixingResult actual)
+    {
+        Assert.Equal(expected.Status, actual.Status);
+        Assert.Equal(expected.Layer, actual.Layer);
+        Assert.Equal(expected.TracerCount, actual.TracerCount);
+        Assert.Equal(expected.DegreesOfFreedom, actual.DegreesOfFreedom);
+        Assert.Equal(expected.Notes, actual.Notes);
+        Assert.Equal(Numbers(expected), Numbers(actual));
+    }
+
+    private static ulong[][] Numbers(MixingResult result) =>
+    [
+        .. ((double[][])[.. result.Fractions, result.FractionSum, .. result.Amounts, .. result.Residuals, result.ResidualMass, result.Misfit, result.Chi2, result.PValue])
+            .Select(column => column.Select(BitConverter.DoubleToUInt64Bits).ToArray()),
+    ];
+
+    private static async Task ReachedAsync(OpenWorkspace workspace, Guid run, long samples)
+    {
+        while ((await workspace.Runs.FindAsync(run))!.Done < samples)
+        {
+            await Task.Delay(1, TestContext.Current.CancellationToken);
+        }
+    }
+}
