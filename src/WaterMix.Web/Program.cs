@@ -1,4 +1,6 @@
+using Microsoft.AspNetCore.Connections;
 using WaterMix.Web.Hosting;
+using WaterMix.Workspace.Storage;
 
 // A published app finds its files beside it, wherever it is started from.
 WebApplicationBuilder builder = WebApplication.CreateBuilder(new WebApplicationOptions
@@ -16,21 +18,23 @@ try
         builder.WebHost.UseUrls(ListeningAddresses.Default);
     }
 
-    using DataFolder folder = DataFolder.Claim(DataFolder.Locate(builder.Configuration));
-    await using WebApplication app = WebHost.Build(builder, folder);
+    await using WebApplication app = WebHost.Build(builder);
+    DataFolder folder = app.Services.GetRequiredService<DataFolder>();
     StartMessages.Announce(app, folder, warning);
     await app.RunAsync();
     return 0;
 }
-catch (StartException refusal)
+catch (OperationCanceledException)
 {
-    Console.Error.WriteLine($"WaterMix does not start: {refusal.Message}");
-    return 1;
+    return 0; // Stopped before it listened.
 }
-catch (IOException fault) when (fault.InnerException is Microsoft.AspNetCore.Connections.AddressInUseException)
+catch (IOException fault) when (fault.InnerException is AddressInUseException)
 {
-    Console.Error.WriteLine($"WaterMix does not start: {fault.Message.TrimEnd('.')}. Stop the program that uses the address, or name another with --urls http://localhost:5081.");
-    return 1;
+    return StartMessages.Refuse($"{fault.Message.TrimEnd('.')}. Stop the program that uses the address, or name another with --urls http://localhost:5081.");
+}
+catch (Exception fault) when (fault is StartException or IOException or InvalidOperationException { Source: "WaterMix.Workspace" })
+{
+    return StartMessages.Refuse(fault.Message);
 }
 
 /// <summary>The entry point, named for the tests that start the app.</summary>

@@ -9,7 +9,7 @@ internal static class MultipartFiles
 {
     private const int LongestBoundary = 200;
 
-    /// <summary>The parts that are files: the field's name, the file's name without any folders, and the bytes, to be read before the next part.</summary>
+    /// <summary>The parts: the field's name, the file's name without any folders (empty where it is no file), and the bytes.</summary>
     /// <param name="request">The request; nothing of its body has been read.</param>
     /// <param name="cancellation">Stops the reading.</param>
     /// <exception cref="InvalidDataException">The body is no multipart form, or breaks off.</exception>
@@ -29,7 +29,7 @@ internal static class MultipartFiles
         var reader = new MultipartReader(boundary, request.Body);
         while (await reader.ReadNextSectionAsync(cancellation) is { } section)
         {
-            if (section.GetContentDispositionHeader() is { } disposition && disposition.IsFileDisposition())
+            if (section.GetContentDispositionHeader() is { } disposition && (disposition.IsFileDisposition() || disposition.IsFormDisposition()))
             {
                 string given = HeaderUtilities.RemoveQuotes(disposition.FileNameStar.HasValue ? disposition.FileNameStar : disposition.FileName).Value ?? "";
                 string field = HeaderUtilities.RemoveQuotes(disposition.Name).Value ?? "";
@@ -38,9 +38,3 @@ internal static class MultipartFiles
         }
     }
 }
-
-/// <summary>A file in a multipart body.</summary>
-/// <param name="Field">The form field's name.</param>
-/// <param name="Name">The file's name, without folders.</param>
-/// <param name="Content">The bytes, readable until the next part is asked for.</param>
-internal sealed record MultipartFile(string Field, string Name, Stream Content);

@@ -1,3 +1,5 @@
+using WaterMix.Workspace.Storage;
+
 namespace WaterMix.Web.Hosting;
 
 /// <summary>What the window says in which the app was started.</summary>
@@ -10,12 +12,21 @@ internal static partial class StartMessages
     public static void Announce(WebApplication app, DataFolder folder, string? warning) => app.Lifetime.ApplicationStarted.Register(() =>
     {
         string addresses = string.Join(", ", app.Urls);
-        Ready(app.Logger, addresses, folder.FullPath);
+        Ready(app.Logger, addresses, folder.Root);
         if (warning is not null)
         {
             Warn(app.Logger, warning);
         }
     });
+
+    /// <summary>Says on the error stream why the app does not start.</summary>
+    /// <param name="reason">Why, and what to do.</param>
+    /// <returns>The exit status.</returns>
+    public static int Refuse(string reason)
+    {
+        Console.Error.WriteLine($"WaterMix does not start: {reason}");
+        return 1;
+    }
 
     [LoggerMessage(Level = LogLevel.Information, Message = "WaterMix is ready at {Addresses}; its data is in {Folder}. Ctrl+C stops it.")]
     private static partial void Ready(ILogger logger, string addresses, string folder);

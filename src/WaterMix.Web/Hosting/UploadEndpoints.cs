@@ -1,6 +1,8 @@
 using Microsoft.AspNetCore.Antiforgery;
 using Microsoft.AspNetCore.Http.Features;
 using Microsoft.AspNetCore.Http.HttpResults;
+using Microsoft.Extensions.Options;
+using WaterMix.Workspace;
 using WaterMix.Workspace.Cruises;
 
 namespace WaterMix.Web.Hosting;
@@ -11,10 +13,8 @@ namespace WaterMix.Web.Hosting;
 /// </summary>
 internal static class UploadEndpoints
 {
-    /// <summary>The setting that changes the largest upload, in MB.</summary>
-    public const string LimitSetting = "WATERMIX_UPLOAD_LIMIT_MB";
-
-    private const long DefaultLimitMb = 2048;
+    // What a form wraps around each file.
+    private const long FormOverhead = 1 << 20;
 
     /// <summary>Adds the endpoints.</summary>
     public static void MapUploads(this IEndpointRouteBuilder routes)
@@ -33,16 +33,16 @@ internal static class UploadEndpoints
 
     /// <summary>Receives the files of a multipart body, one after another.</summary>
     public static async Task<Results<NoContent, ProblemHttpResult>> ReceiveAsync(
-        Guid upload, HttpContext context, IAntiforgery antiforgery, ICruises cruises, IConfiguration configuration)
+        Guid upload, HttpContext context, IAntiforgery antiforgery, ICruises cruises, WorkspaceOptions limits)
     {
-        AntiforgeryOptions options = context.RequestServices.GetRequiredService<Microsoft.Extensions.Options.IOptions<AntiforgeryOptions>>().Value;
+        AntiforgeryOptions options = context.RequestServices.GetRequiredService<IOptions<AntiforgeryOptions>>().Value;
         if (!context.Request.Headers.ContainsKey(options.HeaderName!) || !await antiforgery.IsRequestValidAsync(context))
         {
             return Problem(StatusCodes.Status400BadRequest, "The upload does not come from a page of this WaterMix, or the page has grown old. Load the page again and add the files once more.");
         }
 
-        long limit = configuration.GetValue(LimitSetting, DefaultLimitMb) << 20;
-        string tooLarge = $"The files are larger than {limit >> 20} MB together. Send them in smaller parts, pack them into a zip file, or raise {LimitSetting} where WaterMix is started.";
+        long limit = limits.MostUploadBytes + FormOverhead;
+        string tooLarge = $"The files are larger than {limits.MostUploadBytes >> 20} MB. Pack them into a zip file, send them as several cruises, or raise {WebHost.UploadLimit} where WaterMix is started.";
         if (context.Features.Get<IHttpMaxRequestBodySizeFeature>() is { IsReadOnly: false } size)
         {
             size.MaxRequestBodySize = limit;
@@ -79,6 +79,11 @@ internal static class UploadEndpoints
         int received = 0;
         await foreach (MultipartFile file in MultipartFiles.ReadAsync(request, cancellation))
         {
+            if (file.Name.Length == 0)
+            {
+                continue;
+            }
+
             await cruises.ReceiveAsync(upload, file.Name, file.Content, cancellation);
             received++;
         }
@@ -88,8 +93,3 @@ internal static class UploadEndpoints
 
     private static ProblemHttpResult Problem(int status, string sentence) => TypedResults.Problem(sentence, statusCode: status, title: "The upload was not taken");
 }
-
-/// <summary>What a page needs to send files.</summary>
-/// <param name="Header">The header's name.</param>
-/// <param name="Value">What it must hold.</param>
-internal sealed record UploadToken(string Header, string Value);
