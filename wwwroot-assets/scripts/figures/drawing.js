@@ -5,6 +5,8 @@ import { isDark, mix, resolve, variable, font } from "./theme.js";
 
 const STRENGTH_STEPS = 64;
 const MISSING = 255;
+const OPAQUE = 0xff000000;
+let sheet = null;
 
 /** Above so many points, what is shown is how dense they lie and their mean colour. */
 export const DENSITY_ABOVE = 200000;
@@ -24,7 +26,7 @@ export function prepare(canvas, width, height) {
     canvas.height = h;
   }
 
-  const context = canvas.getContext("2d");
+  const context = canvas.getContext("2d", { willReadFrequently: true });
   context.setTransform(ratio, 0, 0, ratio, 0, 0);
   context.clearRect(0, 0, width, height);
   return context;
@@ -85,8 +87,8 @@ export function tracePath(context, shape, x, y, r) {
     context.lineTo(x - r * 1.1, y + s * r * 0.85);
     context.closePath();
   } else if (shape === "plus") {
-    const t = r * 0.4;
-    const e = r * 1.1;
+    const t = r * 0.25;
+    const e = r * 1.25;
     context.rect(x - t, y - e, 2 * t, 2 * e);
     context.rect(x - e, y - t, 2 * e, 2 * t);
   } else {
@@ -94,18 +96,20 @@ export function tracePath(context, shape, x, y, r) {
   }
 }
 
-/** One picture per colour, side by side on a canvas, the missing mark last: a point is then a copy of a few pixels. */
-function sprites(table, size, outlined) {
-  const ratio = window.devicePixelRatio || 1;
-  const cell = Math.ceil(size * 1.3) + 3;
+/**
+ * One small picture per colour, the missing mark last, as numbers: a point is then a copy of a few dozen pixels. Copying them here is
+ * some twenty times as fast as drawing each point by the canvas, where that has no graphics card to help.
+ */
+function sprites(table, size, outlined, ratio) {
+  const cell = Math.ceil(size * 1.3 * ratio) + 3;
   const canvas = document.createElement("canvas");
-  canvas.width = Math.ceil(cell * ratio) * (table.length + 1);
-  canvas.height = Math.ceil(cell * ratio);
-  const context = canvas.getContext("2d");
-  const pixels = Math.ceil(cell * ratio);
+  canvas.width = cell * (table.length + 1);
+  canvas.height = cell;
+  const context = canvas.getContext("2d", { willReadFrequently: true });
+  const centre = cell / (2 * ratio);
   table.forEach((entry, i) => {
-    context.setTransform(ratio, 0, 0, ratio, i * pixels, 0);
-    tracePath(context, entry.shape, cell / 2, cell / 2, size / 2);
+    context.setTransform(ratio, 0, 0, ratio, i * cell, 0);
+    tracePath(context, entry.shape, centre, centre, size / 2);
     context.fillStyle = entry.fill;
     context.fill();
     if (outlined) {
@@ -114,59 +118,122 @@ function sprites(table, size, outlined) {
       context.stroke();
     }
   });
-  context.setTransform(ratio, 0, 0, ratio, table.length * pixels, 0);
+  context.setTransform(ratio, 0, 0, ratio, table.length * cell, 0);
   context.beginPath();
-  context.arc(cell / 2, cell / 2, Math.min(2, size / 3), 0, 2 * Math.PI);
+  context.arc(centre, centre, Math.min(2, size / 4), 0, 2 * Math.PI);
+  context.globalAlpha = size < 5 ? 0.3 : 0.7;
   context.strokeStyle = variable("--faint");
   context.lineWidth = 0.9;
   context.stroke();
-  return { canvas, cell, pixels };
+  const pixels = new Uint32Array(context.getImageData(0, 0, canvas.width, cell).data.buffer);
+  return Array.from({ length: table.length + 1 }, (_, i) => {
+    const at = k => Math.floor(k / cell) * canvas.width + i * cell + k % cell;
+    const used = Array.from({ length: cell * cell }, (_, k) => k).filter(k => pixels[at(k)] >>> 24 > 0);
+    return {
+      cell,
+      columns: Int32Array.from(used, k => k % cell),
+      rows: Int32Array.from(used, k => Math.floor(k / cell)),
+      colours: Uint32Array.from(used, k => pixels[at(k)]),
+    };
+  });
+}
+
+/** A sheet of pixels over the plot, blank, reused from drawing to drawing. */
+function blankSheet(width, height) {
+  if (sheet?.canvas.width !== width || sheet.canvas.height !== height) {
+    const canvas = document.createElement("canvas");
+    canvas.width = width;
+    canvas.height = height;
+    const context = canvas.getContext("2d", { willReadFrequently: true });
+    const image = context.createImageData(width, height);
+    sheet = { canvas, context, image, pixels: new Uint32Array(image.data.buffer) };
+  } else {
+    sheet.pixels.fill(0);
+  }
+
+  return sheet;
 }
 
 /** Draws the points of a layer: { n, x, y, size, colour, numbers, bins }. */
 export function drawPoints(context, view, layer) {
-  const table = colourTable(layer.colour);
-  if (layer.n > DENSITY_ABOVE) {
-    drawDensity(context, view, layer, table);
-    return;
+  const ratio = window.devicePixelRatio || 1;
+  const look = `${isDark()} ${ratio}`;
+  if (layer.look !== look) {
+    layer.look = look;
+    layer.pictures = sprites(colourTable(layer.colour), layer.size, layer.colour.kind === "strength" || layer.colour.kind === "scale", ratio);
   }
 
-  const { canvas, cell, pixels } = sprites(table, layer.size, layer.colour.kind === "strength" || layer.colour.kind === "scale");
-  const { numbers } = layer;
-  const half = cell / 2;
-  const ax = view.width / (view.x1 - view.x0);
-  const ay = -view.height / (view.y1 - view.y0);
-  const bx = view.left - view.x0 * ax - half;
-  const by = view.top + view.height - view.y0 * ay - half;
-  const right = view.left + view.width;
-  const bottom = view.top + view.height;
-  for (let pass = 0; pass < 2; pass++) {
-    for (let i = 0; i < layer.n; i++) {
-      const bin = layer.bins[i];
-      if ((bin === MISSING) !== (pass === 0)) {
-        continue;
-      }
+  const pictures = layer.pictures;
+  const target = blankSheet(Math.max(1, Math.round(view.width * ratio)), Math.max(1, Math.round(view.height * ratio)));
+  const place = {
+    ax: target.canvas.width / (view.x1 - view.x0), x0: view.x0,
+    ay: -target.canvas.height / (view.y1 - view.y0), y0: view.y0, height: target.canvas.height,
+  };
+  if (layer.n > DENSITY_ABOVE) {
+    stampDensity(target, place, layer, pictures);
+  } else {
+    stampPoints(target, place, layer, pictures, true);
+    stampPoints(target, place, layer, pictures, false);
+  }
 
-      const px = numbers[layer.x + i] * ax + bx;
-      const py = numbers[layer.y + i] * ay + by;
-      if (px > view.left - cell && px < right && py > view.top - cell && py < bottom) {
-        context.drawImage(canvas, (bin === MISSING ? table.length : bin) * pixels, 0, pixels, pixels, px, py, cell, cell);
+  target.context.putImageData(target.image, 0, 0);
+  context.drawImage(target.canvas, view.left, view.top, view.width, view.height);
+}
+
+function stampPoints(target, place, layer, pictures, missing) {
+  const { pixels } = target;
+  const { width, height } = target.canvas;
+  const { numbers } = layer;
+  const half = pictures[0].cell / 2;
+  for (let i = 0; i < layer.n; i++) {
+    const bin = layer.bins[i];
+    if ((bin === MISSING) !== missing) {
+      continue;
+    }
+
+    const left = Math.round((numbers[layer.x + i] - place.x0) * place.ax - half);
+    const top = Math.round(place.height + (numbers[layer.y + i] - place.y0) * place.ay - half);
+    if (!(left > -2 * half && left < width && top > -2 * half && top < height)) {
+      continue;
+    }
+
+    const { columns, rows, colours } = pictures[missing ? pictures.length - 1 : bin];
+    for (let k = 0; k < colours.length; k++) {
+      const x = left + columns[k];
+      const y = top + rows[k];
+      if (x >= 0 && x < width && y >= 0 && y < height) {
+        const at = y * width + x;
+        const above = colours[k];
+        const below = pixels[at];
+        pixels[at] = above >= OPAQUE || below === 0 ? above : over(above, below);
       }
     }
   }
 }
 
+/** A colour over another, each with its alpha in the highest byte. Two parts at a time, which leaves their products room. */
+function over(above, below) {
+  const a = above >>> 24;
+  const rest = ((below >>> 24) * (255 - a) + 127) / 255 | 0;
+  const alpha = a + rest;
+  const share = (a << 8) / alpha | 0;
+  const odd = ((above & 0xff00ff) * share + (below & 0xff00ff) * (256 - share)) / 256 & 0xff00ff;
+  const even = ((above >>> 8 & 0xff) * share + (below >>> 8 & 0xff) * (256 - share)) & 0xff00;
+  return (alpha << 24 | odd | even) >>> 0;
+}
+
 /** Squares of two pixels: their colour is the mean of their points' colours, their strength grows with the logarithm of the number. */
-function drawDensity(context, view, layer, table) {
+function stampDensity(target, place, layer, pictures) {
+  const { width, height } = target.canvas;
   const side = 2;
-  const columns = Math.max(1, Math.ceil(view.width / side));
-  const rows = Math.max(1, Math.ceil(view.height / side));
+  const columns = Math.ceil(width / side);
+  const rows = Math.ceil(height / side);
   const counts = new Uint32Array(columns * rows);
   const sums = new Float64Array(columns * rows);
   let most = 1;
   for (let i = 0; i < layer.n; i++) {
-    const column = Math.floor((toX(view, layer.numbers[layer.x + i]) - view.left) / side);
-    const row = Math.floor((toY(view, layer.numbers[layer.y + i]) - view.top) / side);
+    const column = Math.floor((layer.numbers[layer.x + i] - place.x0) * place.ax / side);
+    const row = Math.floor((place.height + (layer.numbers[layer.y + i] - place.y0) * place.ay) / side);
     if (column >= 0 && column < columns && row >= 0 && row < rows && layer.bins[i] !== MISSING) {
       const at = row * columns + column;
       sums[at] += layer.bins[i];
@@ -174,16 +241,17 @@ function drawDensity(context, view, layer, table) {
     }
   }
 
-  for (let at = 0; at < counts.length; at++) {
-    if (counts[at] > 0) {
-      const mean = layer.colour.kind === "categories" ? Math.round(sums[at] / counts[at]) : sums[at] / counts[at];
-      context.globalAlpha = 0.25 + 0.75 * Math.log1p(counts[at]) / Math.log1p(most);
-      context.fillStyle = table[Math.min(table.length - 1, Math.round(mean))].fill;
-      context.fillRect(view.left + (at % columns) * side, view.top + Math.floor(at / columns) * side, side, side);
+  // The middle pixel of a picture has its full colour.
+  const full = pictures.map(p => p.colours[p.colours.length >> 1] & 0xffffff);
+  for (let y = 0; y < height; y++) {
+    for (let x = 0; x < width; x++) {
+      const at = Math.floor(y / side) * columns + Math.floor(x / side);
+      if (counts[at] > 0) {
+        const alpha = 255 * (0.25 + 0.75 * Math.log1p(counts[at]) / Math.log1p(most));
+        target.pixels[y * width + x] = (alpha << 24 | full[Math.round(sums[at] / counts[at])]) >>> 0;
+      }
     }
   }
-
-  context.globalAlpha = 1;
 }
 
 function tracePoints(context, view, layer) {

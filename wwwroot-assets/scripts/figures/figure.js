@@ -8,9 +8,15 @@ const REACH = 12;
 const MOVE_EVERY_MS = 60;
 let loading = null;
 
-/** Loads plotly.js once. The stylesheet takes the place of the rules that it would write into the page by script. */
+/** The id under which plotly.js 3.7.0 would write the styles of its street maps into the page; nothing here draws one. */
+const STREET_MAP_STYLE = "ce8d464691048653ffe3a57c6c18ab566e8366f186677868cf724621a857b4fe";
+
+/** Loads plotly.js once. Our stylesheet takes the place of the rules that it would write into the page by script. */
 function loadPlotly() {
   loading ??= (async () => {
+    const none = document.createElement("meta");
+    none.id = STREET_MAP_STYLE;
+    document.head.append(none);
     const style = document.createElement("link");
     style.id = "plotly.js-style-global";
     style.className = "no-inline-styles";

@@ -155,7 +155,7 @@ public sealed partial class ScatterFigure
         else if (_drawn.SelectedRow != now.SelectedRow)
         {
             _drawn = now;
-            await _plot.InvokeVoidAsync("select", Selected());
+            await _plot.InvokeVoidAsync("select", [Selected()]);
         }
     }
 

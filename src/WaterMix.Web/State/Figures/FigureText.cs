@@ -24,6 +24,14 @@ public static class FigureText
         return Fixed(value, decimals);
     }
 
+    /// <summary>A measured value with up to six significant digits, without zeros at the end.</summary>
+    /// <param name="value">The value; NaN is missing.</param>
+    public static string Measured(double value)
+    {
+        string text = Number(value, 6);
+        return text.Contains('.') ? text.TrimEnd('0').TrimEnd('.') : text;
+    }
+
     /// <summary>A number with fixed decimals and a true minus sign; never minus zero. An en dash where it is missing.</summary>
     /// <param name="value">The number; NaN is missing.</param>
     /// <param name="decimals">Digits after the point, 0 to 15.</param>

@@ -23,7 +23,7 @@ public sealed record PropertyPicture(IReadOnlyList<FigureLayer> Layers, string S
         var layers = new List<FigureLayer>();
         if (moves)
         {
-            layers.Add(Polygon("with-processes", "mixtures and processes", region.WithProcesses, "--faint") with { Opacity = 0.05, Dashed = true });
+            layers.Add(Polygon("with-processes", "mixtures and processes (dashed)", region.WithProcesses, "--faint") with { Opacity = 0.05, Dashed = true });
         }
 
         if (region.Mixtures.Count > 1)

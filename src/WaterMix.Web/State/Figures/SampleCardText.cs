@@ -108,7 +108,7 @@ public sealed record SampleCardText
         {
             double residual = cruise.Result!.Residuals[index][own];
             double scale = double.IsNaN(residual) ? double.NaN : ResidualScale.Of(model!, tracer, observed, fractions);
-            yield return Tracer(columns, cruise, tracer, own, row) with { Residual = Signed(residual), ResidualInSd = Signed(residual / scale, 1) };
+            yield return Tracer(columns, cruise, tracer, own, row) with { Residual = Signed(residual, DecimalsOf(scale)), ResidualInSd = Signed(residual / scale, 1) };
         }
 
         foreach (SampleColumn column in cruise.Samples.Columns.Where(c => !tracers.Contains(c.Id) && !IsPlace(c.Quantity) && !double.IsNaN(c.Values[own])))
@@ -127,7 +127,7 @@ public sealed record SampleCardText
             : column.OriginAt(own) switch { ValueOrigin.Ctd => "CTD", ValueOrigin.Bottle => "bottle", _ => "" };
         string suffix = column is { Suffix.Length: > 0 } ? $" ({column.Suffix.TrimStart('_').Replace("ctd", "CTD", StringComparison.Ordinal)})" : "";
         string flag = column is null || column.FlagAt(own) == QualityFlags.NoFlag ? "" : column.FlagAt(own).ToString(CultureInfo.InvariantCulture);
-        return new CardTracer(quantity.Name + suffix, FigureText.Unit(quantity.Unit), FigureText.Number(value, 6), flag, origin);
+        return new CardTracer(quantity.Name + suffix, FigureText.Unit(quantity.Unit), FigureText.Measured(value), flag, origin);
     }
 
     private static bool IsPlace(Quantity quantity) => quantity.Use == TracerUse.Never && quantity.Unit is "degrees north" or "degrees east" or "dbar" or "m";
@@ -143,10 +143,13 @@ public sealed record SampleCardText
         yield return ("Tracers used", result.TracerCount[own].ToString(CultureInfo.InvariantCulture));
     }
 
-    private static string Signed(double value, int? decimals = null)
+    /// <summary>Decimals that show two digits of a standard deviation; what is smaller than that says nothing.</summary>
+    private static int DecimalsOf(double scale) => scale > 0 ? Math.Clamp(1 - (int)Math.Floor(Math.Log10(scale)), 0, 9) : 4;
+
+    private static string Signed(double value, int decimals)
     {
-        string text = decimals is { } d ? FigureText.Fixed(value, d) : FigureText.Number(value, 3);
-        return value > 0 && text != "0" ? $"+{text}" : text;
+        string text = FigureText.Fixed(value, decimals);
+        return value > 0 && text.AsSpan().IndexOfAnyInRange('1', '9') >= 0 ? $"+{text}" : text;
     }
 }
 

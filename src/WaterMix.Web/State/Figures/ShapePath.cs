@@ -11,9 +11,10 @@ public static class ShapePath
     public static string Of(PointShape shape, double radius)
     {
         string r = Text(radius);
+        string end = Text(radius * 1.25);
         string side = Text(radius * 0.88);
         string wide = Text(radius * 1.2);
-        string arm = Text(radius * 0.4);
+        string arm = Text(radius * 0.25);
         string tall = Text(radius * 1.15);
         string half = Text(radius * 0.85);
         return shape switch
@@ -22,7 +23,7 @@ public static class ShapePath
             PointShape.Diamond => $"M0,-{wide}L{wide},0L0,{wide}L-{wide},0Z",
             PointShape.Triangle => $"M0,-{tall}L{tall},{half}H-{tall}Z",
             PointShape.TriangleDown => $"M0,{tall}L{tall},-{half}H-{tall}Z",
-            PointShape.Plus => $"M-{arm},-{r}H{arm}V-{arm}H{r}V{arm}H{arm}V{r}H-{arm}V{arm}H-{r}V-{arm}H-{arm}Z",
+            PointShape.Plus => $"M-{arm},-{end}H{arm}V-{arm}H{end}V{arm}H{arm}V{end}H-{arm}V{arm}H-{end}V-{arm}H-{arm}Z",
             _ => $"M-{r},0A{r},{r} 0 1 1 {r},0A{r},{r} 0 1 1 -{r},0Z",
         };
     }
