@@ -31,7 +31,7 @@ public sealed class ResultsPageTests : BunitContext
         IRenderedComponent<ResultsPage> page = Open(new OneStudy(TwoLayers.Run()));
 
         page.WaitForElement("#samples-heading");
-        Assert.Equal(8, page.FindAll("table").Last().QuerySelectorAll("tbody tr").Length);
+        Assert.Equal(8, page.FindAll("table")[^1].QuerySelectorAll("tbody tr").Length);
         Assert.Contains("3f2a9c0d11223344", page.Markup, StringComparison.Ordinal);
         Assert.Equal(
             [$"api/runs/{TwoLayers.RunId}/results.csv", $"api/runs/{TwoLayers.RunId}/model.json", $"api/runs/{TwoLayers.RunId}/endmembers.json"],
@@ -65,7 +65,7 @@ public sealed class ResultsPageTests : BunitContext
 
         page.WaitForAssertion(() => Assert.Equal("descending", Head(page).ParentElement!.GetAttribute("aria-sort")));
         Assert.EndsWith("?sort=-pressure", Address, StringComparison.Ordinal);
-        Assert.StartsWith("8", page.FindAll("table").Last().QuerySelector("tbody tr .row-head")!.TextContent.Trim(), StringComparison.Ordinal);
+        Assert.StartsWith("8", page.FindAll("table")[^1].QuerySelector("tbody tr .row-head")!.TextContent.Trim(), StringComparison.Ordinal);
 
         static IElement Head(IRenderedComponent<ResultsPage> page) => page.WaitForElement("#samples-heading").Closest("section")!.QuerySelectorAll("thead button").Single(b => b.TextContent.Contains("Pressure", StringComparison.Ordinal));
     }

@@ -1,4 +1,3 @@
-using WaterMix.Core.Mixing;
 using WaterMix.Web.State.Figures;
 using WaterMix.Web.State.Results;
 
