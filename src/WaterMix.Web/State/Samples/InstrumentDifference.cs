@@ -55,7 +55,7 @@ public sealed record InstrumentDifference(
 
         return new InstrumentDifference(
             quantity, pairs.Length, mean, sd,
-            new FigureAxis($"{axis.Title}, bottle less CTD", axis.Unit), FigureAxis.For(Core.Quantities.Quantity.Pressure), layers,
+            new FigureAxis($"{axis.Title}, bottle less CTD", axis.Unit) { Range = Shown(differences) }, FigureAxis.For(Core.Quantities.Quantity.Pressure), layers,
             InWords(axis, differences, down));
     }
 
@@ -67,17 +67,41 @@ public sealed record InstrumentDifference(
         }
 
         (double mean, double sd) = MeanAndSd(differences);
-        int decimals = DecimalsOf(sd);
-        string words = $"Over {PlainText.Count(differences.Length)} pairs the bottle reads {Signed(mean, decimals, axis.Unit)} on average; the standard deviation is {WithUnit(sd, decimals, axis.Unit)}.";
+        (double low, double high) = MiddleHalf(differences);
+        int decimals = DecimalsOf(high > low ? high - low : sd);
+        string words = $"In {PlainText.Count(differences.Length)} pairs {Signed(mean, decimals, axis.Unit)} on average; the standard deviation is {WithUnit(sd, decimals, axis.Unit)}; half of the differences lie between {FigureText.Fixed(low, decimals)} and {WithUnit(high, decimals, axis.Unit)}.";
         double[] deep = [.. differences.Where((_, i) => down[i] >= DeepDbar)];
         if (deep.Length >= 2 && deep.Length < differences.Length)
         {
             (double deepMean, double deepSd) = MeanAndSd(deep);
-            words += $" Below {PlainText.Number(DeepDbar, 0)} dbar ({PlainText.Count(deep.Length)} pairs): {Signed(deepMean, decimals, axis.Unit)}, standard deviation {WithUnit(deepSd, decimals, axis.Unit)}.";
+            words += $" Below {PlainText.Number(DeepDbar, 0)} dbar ({PlainText.Count(deep.Length)} pairs) {Signed(deepMean, decimals, axis.Unit)}, standard deviation {WithUnit(deepSd, decimals, axis.Unit)}.";
         }
 
         int far = differences.Count(d => Math.Abs(d - mean) > 3 * sd);
-        return far == 0 ? words : $"{words} {PlainText.Count(far, "pair lies", "pairs lie")} more than three standard deviations from the mean: look at their flags.";
+        FigureRange shown = Shown(differences)!.Value;
+        int beyond = differences.Count(d => d < shown.From || d > shown.To);
+        words += far == 0 ? "" : $" {PlainText.Count(far, "pair lies", "pairs lie")} more than three standard deviations from the mean: look at their flags.";
+        return beyond == 0 ? words : $"{words} {PlainText.Count(beyond, "pair stands", "pairs stand")} outside the plot; Show all brings {(beyond == 1 ? "it" : "them")} in.";
+    }
+
+    // The middle half and five times its width on both sides: one stray pair must not hide the scatter of the others.
+    private static FigureRange? Shown(double[] differences)
+    {
+        if (FigureRange.Of(differences) is not { } all)
+        {
+            return null;
+        }
+
+        (double low, double high) = MiddleHalf(differences);
+        double margin = 5 * (high - low);
+        var near = new FigureRange(Math.Max(all.From, low - margin), Math.Min(all.To, high + margin));
+        return (near.Width > 0 ? near : all).WithMargin(0.05);
+    }
+
+    private static (double Low, double High) MiddleHalf(double[] values)
+    {
+        double[] sorted = [.. values.Order()];
+        return sorted.Length == 0 ? (double.NaN, double.NaN) : (sorted[(sorted.Length - 1) / 4], sorted[3 * (sorted.Length - 1) / 4]);
     }
 
     private static (double Mean, double Sd) MeanAndSd(double[] values)
@@ -92,5 +116,5 @@ public sealed record InstrumentDifference(
     private static string WithUnit(double value, int decimals, string unit) => unit.Length == 0 ? FigureText.Fixed(value, decimals) : $"{FigureText.Fixed(value, decimals)} {unit}";
 
     private static string Signed(double value, int decimals, string unit) =>
-        Math.Round(value, decimals) == 0 ? "the same as the CTD to the digits shown" : $"{WithUnit(Math.Abs(value), decimals, unit)} {(value > 0 ? "more" : "less")} than the CTD";
+        Math.Round(value, decimals) == 0 ? "bottle and CTD read the same to the digits shown" : $"the bottle reads {WithUnit(Math.Abs(value), decimals, unit)} {(value > 0 ? "more" : "less")} than the CTD";
 }

@@ -61,9 +61,10 @@ public sealed class MatchForm
     private static string Words(ColumnMatch match) => match.By switch
     {
         MatchedBy.MatchFile => "as you said",
+        _ when match.Ignore => "not used",
         MatchedBy.Id => "by its id",
         MatchedBy.WhpName => "by its WHP name",
         MatchedBy.Name => "by name and unit",
-        _ => match.Ignore ? "not used" : "name not known",
+        _ => "name not known",
     };
 }

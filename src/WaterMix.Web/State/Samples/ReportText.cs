@@ -26,7 +26,7 @@ public sealed class ReportText
         Summary = SummaryOf(report);
         Sources = [.. Merging.Select(SourceSentence).OfType<string>()];
         Conversions = [.. report.Columns.Where(c => c.Conversion.Length > 0 && !IsOriginal(c.Id)).Select(c => $"{NameOf(c.Id)}: {c.Conversion}")];
-        BottleFlags = report.BottleFlags.Count == 0 ? "" : "Bottle flags: " + string.Join(", ", report.BottleFlags.OrderBy(f => f.Key).Select(f => $"{f.Key} {FlagText.OfBottle(f.Key)}, {PlainText.Count(f.Value)}")) + ".";
+        BottleFlags = report.BottleFlags.Count == 0 ? "" : "Bottle flags: " + string.Join(", ", report.BottleFlags.OrderBy(f => f.Key).Select(f => $"{PlainText.Count(f.Value)} with flag {f.Key} ({FlagText.OfBottle(f.Key)})")) + ".";
         LeftOut = report.LeftOut.Count == 0 ? "" : $"Not used: {string.Join(", ", report.LeftOut)}.";
     }
 

@@ -26,9 +26,11 @@ public sealed class SampleFigureMaker(StudySamples samples)
         MapStation? station = StationProfiles.StationOf(samples, view.Station, rows);
         IReadOnlyList<string> profiles = StationProfiles.QuantitiesOf(samples, view.Profiles);
         string? compared = InstrumentDifference.QuantityOf(samples, view.Compare);
+        IReadOnlyList<MapStation> stations = Kept("stations", rows, () => StationsOf(rows));
         return new SampleFigures(
             rows,
-            Kept("stations", rows, () => StationsOf(rows)),
+            stations,
+            Kept("facts", rows, () => CruiseFacts.Of(samples, stations, rows)),
             Kept("section", (place, section), () => SectionOfCasts.Of(samples, cruise, section, place)),
             Kept("property", (rows, x, y, colour), () => PropertyPlot.Of(samples, x, y, colour, rows)),
             Kept("profiles", (station?.Id, string.Join(',', profiles)), () => StationProfiles.Of(samples, station, profiles)),

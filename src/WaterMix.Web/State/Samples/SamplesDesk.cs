@@ -14,8 +14,7 @@ public sealed class SamplesDesk : IDisposable
     private readonly ICruises _cruises;
     private readonly IRuns _runs;
     private readonly SemaphoreSlim _one = new(1, 1);
-    private SampleFigureMaker? _maker;
-    private string _madeFor = "";
+    private (string Key, StudySamples Samples, SampleFigureMaker Maker)? _made;
     private int _wish;
 
     /// <summary>A desk over the services.</summary>
@@ -83,7 +82,7 @@ public sealed class SamplesDesk : IDisposable
             if (Samples is not null && Figures is not null)
             {
                 parts.Add(Figures.Rows.Length == Samples.Columns.RowCount ? "all shown" : $"{PlainText.Count(Figures.Rows.Length)} shown");
-                parts.Add($"bottle flags {FlagText.Of(Samples.Accepted.WaterSample)}; CTD flags {FlagText.Of(Samples.Accepted.Ctd)}");
+                parts.Add($"water-sample flags {FlagText.Of(Samples.Accepted.WaterSample)}; CTD flags {FlagText.Of(Samples.Accepted.Ctd)}");
             }
 
             return parts;
@@ -152,7 +151,7 @@ public sealed class SamplesDesk : IDisposable
         int wish = ++_wish;
         if (List.Cruises.Count == 0)
         {
-            (Samples, Figures, Card, _maker, _madeFor) = (null, null, null, null, "");
+            (Samples, Figures, Card, _made) = (null, null, null, null);
             Changed?.Invoke();
             return;
         }
@@ -166,8 +165,8 @@ public sealed class SamplesDesk : IDisposable
             {
                 if (wish == _wish)
                 {
-                    await ReadSamplesAsync(view);
-                    Take(await Task.Run(() => _maker!.Make(view)), view, wish);
+                    (StudySamples samples, SampleFigureMaker maker) = await ReadSamplesAsync(view);
+                    Take(samples, await Task.Run(() => maker.Make(view)), view, wish);
                 }
             }
             finally
@@ -191,26 +190,26 @@ public sealed class SamplesDesk : IDisposable
         }
     }
 
-    private void Take(SampleFigures figures, SampleView view, int wish)
+    // Samples and figures change together: rows of one mean nothing in the other.
+    private void Take(StudySamples samples, SampleFigures figures, SampleView view, int wish)
     {
         if (wish == _wish)
         {
-            Problem = null;
-            Figures = figures;
-            Card = view.Sample is { } row && row < Samples!.Columns.RowCount ? SampleCardText.Of(Samples.Columns, row) : null;
+            (Problem, Samples, Figures) = (null, samples, figures);
+            Card = view.Sample is { } row && row < samples.Columns.RowCount ? SampleCardText.Of(samples.Columns, row) : null;
         }
     }
 
     // The columns are made anew only where the samples, the results or the flags changed.
-    private async Task ReadSamplesAsync(SampleView view)
+    private async Task<(StudySamples Samples, SampleFigureMaker Maker)> ReadSamplesAsync(SampleView view)
     {
         Study study = Study!;
         AcceptedFlags accepted = view.Filter.Accepted(new AcceptedFlags([.. study.Draft.AcceptFlags], [.. study.Draft.AcceptCtdFlags]));
         Run? last = study.Runs.FirstOrDefault(r => r.State == RunState.Finished);
         string key = string.Join('|', [.. study.Cruises.Select(c => $"{c.Id} {c.SamplesHash} {c.Name}"), FlagText.Of(accepted.WaterSample), FlagText.Of(accepted.Ctd), last?.Id, study.Draft.Fit.Factors]);
-        if (key == _madeFor)
+        if (_made is { } made && made.Key == key)
         {
-            return;
+            return (made.Samples, made.Maker);
         }
 
         IReadOnlyList<CruiseResult> results = last is null ? [] : await _runs.ResultsAsync(last.Id);
@@ -222,8 +221,9 @@ public sealed class SamplesDesk : IDisposable
         }
 
         DerivedTracerFactors factors = study.Draft.Fit.Factors;
-        Samples = await Task.Run(() => new StudySamples(study.Cruises, tables, accepted, factors));
-        _maker = new SampleFigureMaker(Samples);
-        _madeFor = key;
+        StudySamples samples = await Task.Run(() => new StudySamples(study.Cruises, tables, accepted, factors));
+        var maker = new SampleFigureMaker(samples);
+        _made = (key, samples, maker);
+        return (samples, maker);
     }
 }

@@ -11,7 +11,7 @@ namespace WaterMix.Web.State.Samples;
 /// <param name="Caption">What is shown, in a sentence.</param>
 public sealed record StationProfiles(string Station, string Title, double[] Pressure, IReadOnlyList<ProfileSeries> Series, string Caption)
 {
-    private const int Most = 4;
+    private const int Most = 3;
 
     private static readonly string[] Usual = ["potential_temperature", "practical_salinity", "oxygen", "silicate", "nitrate", "phosphate", "in_situ_temperature"];
 
