@@ -20,7 +20,7 @@ public sealed record LayerSummary(
     /// <summary>Below this p a sample counts as improbable.</summary>
     public const double Improbable = 0.05;
 
-    /// <summary>The summaries of the layers that have samples, and last of all layers together where there are several.</summary>
+    /// <summary>The summaries of the layers that have samples, and last, where there are several, of all layers together.</summary>
     /// <param name="results">The results.</param>
     /// <param name="rows">The rows that are shown.</param>
     public static IReadOnlyList<LayerSummary> Of(RunResults results, int[] rows)
@@ -37,7 +37,7 @@ public sealed record LayerSummary(
             }
         }
 
-        if (results.LayerIds.Count > 1)
+        if (summaries.Count > 1)
         {
             summaries.Add(One(results, "all layers", [.. rows.Where(row => results.Layer[row] >= 0)], missingAsZero: true));
         }

@@ -129,8 +129,8 @@ public sealed class ResultsPageTests : BunitContext
     private IRenderedComponent<ResultsPage> Open(OneStudy workspace, ResultsView? view = null)
     {
         JSInterop.Mode = JSRuntimeMode.Loose;
-        SetRendererInfo(new RendererInfo("Server", isInteractive: true));
         Services.AddSingleton<IStudies>(workspace).AddSingleton<ICruises>(workspace).AddSingleton<IRuns>(workspace).AddSingleton(TimeProvider.System);
+        SetRendererInfo(new RendererInfo("Server", isInteractive: true));
         Services.GetRequiredService<BunitNavigationManager>().NavigateTo(ResultsAddress.Of(OneStudy.Id, view ?? new ResultsView()));
         return Render<ResultsPage>(p => p.Add(x => x.Id, OneStudy.Id));
     }

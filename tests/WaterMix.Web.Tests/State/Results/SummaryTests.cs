@@ -38,12 +38,15 @@ public class SummaryTests
     }
 
     [Fact]
-    public void LayerSummary_NoRows_IsOnlyTheLineOfAllLayersWithoutNumbers()
-    {
-        LayerSummary only = Assert.Single(LayerSummary.Of(Results, []));
+    public void LayerSummary_RowsOfOneLayer_HaveNoSecondLineThatSaysTheSame() =>
+        Assert.Equal(["deep"], LayerSummary.Of(Results, [2, 3, 6]).Select(l => l.Layer));
 
-        Assert.Equal(0, only.Samples);
-        Assert.Equal(["0", "0", "–", "–", "–", "–", "–", "–"], LayerLine.Of(only).Cells);
+    [Fact]
+    public void LayerLine_NoAnswer_HasADashForEachNumberThereIsNot()
+    {
+        LayerSummary only = Assert.Single(LayerSummary.Of(Results, [3]));
+
+        Assert.Equal(["1", "0", "–", "–", "–", "–", "–", "–"], LayerLine.Of(only).Cells);
     }
 
     [Fact]
