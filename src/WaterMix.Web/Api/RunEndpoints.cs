@@ -1,4 +1,6 @@
 using Microsoft.AspNetCore.Http.HttpResults;
+using Microsoft.AspNetCore.Mvc;
+using WaterMix.Formats.EndMemberSets;
 using WaterMix.Formats.MixingModels;
 using WaterMix.Workspace.Runs;
 
@@ -15,6 +17,7 @@ internal static class RunEndpoints
         runs.MapGet("/{id:guid}/results.csv", ResultsAsync).WithName("runResults").WithSummary("The results, as the command line would write them")
             .Produces(200, contentType: "text/csv").ProducesProblem(404).ProducesProblem(409);
         runs.MapGet("/{id:guid}/model.json", ModelAsync).WithName("runModel").WithSummary("The run's model, its set inline").Produces(200, contentType: "application/json");
+        runs.MapGet("/{id:guid}/endmembers.json", EndMembersAsync).WithName("runEndMembers").WithSummary("The run's end-member set").Produces(200, contentType: "application/json");
     }
 
     /// <summary>A run.</summary>
@@ -33,6 +36,12 @@ internal static class RunEndpoints
     public static async Task<Results<FileContentHttpResult, ProblemHttpResult>> ModelAsync(Guid id, IRuns runs) =>
         await runs.FindAsync(id) is { } run
             ? TypedResults.File(MixingModelFile.Write(run.Model with { EndMembersFile = null }), "application/json", "model.mixmodel.json")
+            : Missing(id);
+
+    /// <summary>The end-member set of a run.</summary>
+    public static async Task<Results<FileContentHttpResult, ProblemHttpResult>> EndMembersAsync(Guid id, [FromServices] IRuns runs) =>
+        await runs.FindAsync(id) is { } run
+            ? TypedResults.File(EndMemberSetFile.Write(run.Model.EndMembers), "application/json", "set.endmembers.json")
             : Missing(id);
 
     /// <summary>The answer about a run that is not there.</summary>

@@ -9,13 +9,13 @@ namespace WaterMix.Web.State.Figures;
 /// <summary>
 /// The samples of a study as arrays for figures. The rows of several cruises run on: row r of the second cruise is the first
 /// cruise's number of samples plus r. Columns are made when first asked for, and kept. Every array has <see cref="RowCount"/>
-/// entries, NaN where there is no usable value; none may be written to.
+/// entries, NaN where there is no usable value; none may be written to. Several threads may ask at once.
 /// </summary>
 public sealed class FigureColumns
 {
     private readonly AcceptedFlags _accepted;
     private readonly DerivedTracerFactors? _factors;
-    private readonly ConcurrentDictionary<string, double[]> _columns = new(StringComparer.Ordinal); // Pages compute beside the thread that draws.
+    private readonly ConcurrentDictionary<string, Lazy<double[]>> _columns = new(StringComparer.Ordinal);
     private readonly int[] _firstRows;
     private CruiseTrack? _track;
 
@@ -160,13 +160,10 @@ public sealed class FigureColumns
         return index < 0 ? null : columns(cruise.Result!)[index];
     }
 
-    private double[] Kept(string key, Func<FigureCruise, double[]?> make)
-    {
-        if (_columns.TryGetValue(key, out double[]? kept))
-        {
-            return kept;
-        }
+    private double[] Kept(string key, Func<FigureCruise, double[]?> make) => _columns.GetOrAdd(key, _ => new Lazy<double[]>(() => Joined(make))).Value;
 
+    private double[] Joined(Func<FigureCruise, double[]?> make)
+    {
         double[] column = new double[RowCount];
         column.AsSpan().Fill(double.NaN);
         foreach ((int index, FigureCruise cruise) in Cruises.Index())
@@ -174,7 +171,6 @@ public sealed class FigureColumns
             make(cruise)?.CopyTo(column, _firstRows[index]);
         }
 
-        _columns[key] = column;
         return column;
     }
 }
