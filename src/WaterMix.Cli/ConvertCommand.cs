@@ -14,7 +14,7 @@ internal static class ConvertCommand
     public static Command Create()
     {
         var reading = new ReadingArguments();
-        Option<string?> output = OutputOption.Create(required: true);
+        Option<string?> output = OutputOption.Table(required: true);
         var derive = new Option<string[]>("--derive")
         {
             Description = "Quantities to derive and add, such as potential_temperature,sigma0.",
@@ -33,6 +33,7 @@ internal static class ConvertCommand
         };
         var command = new Command("convert", "Writes samples as a tidy table in canonical quantities and units.") { output, derive };
         reading.AddTo(command);
+        OutputOption.MustNotBeRead(command, output, reading.Files);
         command.SetAction((parse, cancellation) => Task.Run(() => Run(
             reading.Samples(parse), findings => reading.Options(parse, findings), parse.GetRequiredValue(output)!, parse.GetRequiredValue(derive), cancellation)));
         return command;
@@ -46,7 +47,7 @@ internal static class ConvertCommand
             return Messages.NotUsable(findings);
         }
 
-        using OpenedSamples samples = SampleReader.Open(paths, options);
+        using OpenedSamples samples = SampleReader.Open(paths, options with { Cancellation = cancellation });
         if (samples.HasErrors)
         {
             return Messages.NotUsable(samples.Findings);
@@ -54,18 +55,21 @@ internal static class ConvertCommand
 
         using var output = new OutputFile(outputPath);
         var progress = new SampleProgress("converted");
-        long rows = 0;
-        using (var csv = new TidyCsvWriter(output.Stream))
+        long rows = output.Write(stream =>
         {
+            long written = 0;
+            using var csv = new TidyCsvWriter(stream);
             foreach (SampleBlock block in samples.ReadBlocks(cancellation))
             {
                 DerivedSamples derived = SampleDerivation.Derive(block.Table, derive);
                 findings.AddFolded(derived.Notes);
                 csv.Write(derived.Table);
-                rows += derived.Table.RowCount;
-                progress.Report(rows);
+                written += derived.Table.RowCount;
+                progress.Report(written);
             }
-        }
+
+            return written;
+        });
 
         if (samples.HasErrors)
         {

@@ -15,18 +15,21 @@ internal static class ConvertSetCommand
         var set = new Argument<string>("SET") { Description = "The end-member set; every end-member needs its position.", HelpName = "SET.endmembers.json" };
         var pair = new Option<string>("--pair") { Description = "conservative: Conservative Temperature and Absolute Salinity. potential: potential temperature and Practical Salinity.", HelpName = "PAIR", Required = true };
         pair.AcceptOnlyFromAmong("conservative", "potential");
-        var output = new Option<string>("--out") { Description = "The set to write.", HelpName = "NEW.endmembers.json", Required = true };
+        Option<string?> output = OutputOption.Create("--out", "The set to write.", "NEW.endmembers.json", required: true);
         var command = new Command("convert-set", "Writes an end-member set in the other temperature and salinity pair.") { set, pair, output };
+        UnknownOption.Refuse(set);
+        OutputOption.MustNotBeRead(command, output, set);
         command.SetAction(parse => Run(
             parse.GetRequiredValue(set),
             parse.GetRequiredValue(pair) == "conservative" ? TemperatureSalinityPair.ConservativeAndAbsolute : TemperatureSalinityPair.PotentialAndPractical,
-            parse.GetRequiredValue(output)));
+            parse.GetRequiredValue(output)!));
         return command;
     }
 
     private static int Run(string path, TemperatureSalinityPair pair, string outputPath)
     {
-        Reading<EndMemberSet> reading = JsonFile.Read(path, "the end-member set", (bytes, name) => EndMemberSetFile.Read(bytes, name));
+        const string What = "the end-member set";
+        Reading<EndMemberSet> reading = NamedDocument.Read(path, What, file => JsonFile.Read(file, What, (bytes, name) => EndMemberSetFile.Read(bytes, name)));
         if (reading.Value is null)
         {
             return Messages.NotUsable(reading.Findings);
@@ -40,7 +43,7 @@ internal static class ConvertSetCommand
         }
 
         using var output = new OutputFile(outputPath);
-        output.Stream.Write(EndMemberSetFile.Write(converted.Set));
+        output.WriteBytes(EndMemberSetFile.Write(converted.Set));
         output.Finish();
         Messages.Print(findings);
         return ExitStatus.Done;

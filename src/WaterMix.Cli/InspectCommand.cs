@@ -12,9 +12,10 @@ internal static class InspectCommand
     {
         var reading = new ReadingArguments();
         var json = new Option<bool>("--json") { Description = "The report as JSON." };
-        var save = new Option<string?>("--save-columns") { Description = "Write the column match as it was guessed, to correct and to give to --columns.", HelpName = "MATCH.json" };
+        Option<string?> save = OutputOption.Create("--save-columns", "Write the column match as it was guessed, to correct and to give to --columns.", "MATCH.json", required: false);
         var command = new Command("inspect", "Says what the reader makes of files: format, columns, units, conversions, flags, problems.") { json, save };
         reading.AddTo(command);
+        OutputOption.MustNotBeRead(command, save, reading.Files);
         command.SetAction((parse, cancellation) => Task.Run(() => Run(
             reading.Samples(parse), findings => reading.Options(parse, findings), parse.GetValue(json), parse.GetValue(save), cancellation)));
         return command;
@@ -28,20 +29,21 @@ internal static class InspectCommand
             return Messages.NotUsable(findings);
         }
 
-        using OpenedSamples samples = SampleReader.Open(paths, options);
+        using OpenedSamples samples = SampleReader.Open(paths, options with { Cancellation = cancellation });
         var progress = new SampleProgress("read");
         foreach (SampleBlock block in samples.ReadBlocks(cancellation))
         {
             progress.Report(block.FirstRow + block.Table.RowCount - 1);
         }
 
-        Console.Out.Write(json ? ImportReportJson.Write(samples.Report) : samples.Report.ToText());
         if (save is not null)
         {
             using var output = new OutputFile(save);
-            output.Stream.Write(samples.Match.Write());
+            output.WriteBytes(samples.Match.Write());
             output.Finish();
         }
+
+        Console.Out.Write(json ? ImportReportJson.Write(samples.Report) : samples.Report.ToText());
 
         return samples.HasErrors ? ExitStatus.NotUsable : ExitStatus.Done;
     }

@@ -1,3 +1,4 @@
+using System.CommandLine;
 using System.Diagnostics;
 using System.Globalization;
 using WaterMix.Core;
@@ -25,6 +26,39 @@ internal static class Messages
         Console.Error.WriteLine(string.Create(
             CultureInfo.InvariantCulture, $"watermix: the input is not usable ({errors} {(errors == 1 ? "error" : "errors")}); nothing was written."));
         return ExitStatus.NotUsable;
+    }
+
+    /// <summary>Ends what the parser said of a wrong command line with where to look.</summary>
+    /// <param name="command">The command that was meant.</param>
+    public static int WrongUsage(Command command)
+    {
+        Console.Error.WriteLine($"watermix: nothing was done; 'watermix {(command is RootCommand ? "" : command.Name + " ")}--help' shows the usage.");
+        return ExitStatus.Stopped;
+    }
+
+    /// <summary>Says that the work was interrupted.</summary>
+    public static int Interrupted()
+    {
+        Console.Error.WriteLine("watermix: interrupted; nothing was written.");
+        return ExitStatus.Stopped;
+    }
+
+    /// <summary>Says what the system refused.</summary>
+    public static int NotPossible(Exception fault)
+    {
+        Console.Error.WriteLine($"watermix: {fault.Message.TrimEnd('.')}. Nothing was written; check the name, the folder and the free space, then run it again.");
+        return ExitStatus.Stopped;
+    }
+
+    /// <summary>Owns up to what nobody foresaw, in one sentence that can be reported.</summary>
+    /// <param name="fault">What was thrown.</param>
+    /// <param name="arguments">The command line.</param>
+    public static int ProgramFault(Exception fault, string[] arguments)
+    {
+        string command = string.Join(' ', arguments.Select(a => a.Length == 0 || a.Any(char.IsWhiteSpace) ? $"\"{a}\"" : a));
+        string message = string.Join(' ', fault.Message.Split(['\r', '\n'], StringSplitOptions.RemoveEmptyEntries)).TrimEnd('.');
+        Console.Error.WriteLine($"watermix: stopped by a fault of the program, and nothing was written; please report this command and this message to whoever maintains the program: watermix {command}: {fault.GetType().Name}: {message}.");
+        return ExitStatus.Stopped;
     }
 
     /// <summary>True where an error is among the findings.</summary>

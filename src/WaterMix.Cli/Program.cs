@@ -1,4 +1,5 @@
 using System.CommandLine;
+using System.CommandLine.Invocation;
 using WaterMix.Cli;
 
 var root = new RootCommand("Apportions sea water samples into source waters: water-mass mixing analysis (optimum multiparameter).")
@@ -11,16 +12,29 @@ var root = new RootCommand("Apportions sea water samples into source waters: wat
 
 try
 {
+    ParseResult parse = root.Parse(args);
     var configuration = new InvocationConfiguration { EnableDefaultExceptionHandler = false };
-    return await root.Parse(args).InvokeAsync(configuration);
+    if (parse.Action is ParseErrorAction wrongUsage)
+    {
+        // The standard output is for results, and a pipe would take anything else for them.
+        configuration.Output = configuration.Error;
+        wrongUsage.ShowHelp = false;
+        await parse.InvokeAsync(configuration);
+        return Messages.WrongUsage(parse.CommandResult.Command);
+    }
+
+    int status = await parse.InvokeAsync(configuration);
+    return status is ExitStatus.Done or ExitStatus.Stopped or ExitStatus.NotUsable ? status : Messages.Interrupted();
 }
 catch (OperationCanceledException)
 {
-    Console.Error.WriteLine("watermix: interrupted; nothing was written.");
-    return ExitStatus.Stopped;
+    return Messages.Interrupted();
 }
 catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
 {
-    Console.Error.WriteLine($"watermix: {fault.Message} Nothing was written; check the name, the folder and the free space, then run it again.");
-    return ExitStatus.Stopped;
+    return Messages.NotPossible(fault);
+}
+catch (Exception fault)
+{
+    return Messages.ProgramFault(fault, args);
 }

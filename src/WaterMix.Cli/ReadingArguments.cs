@@ -40,9 +40,13 @@ internal sealed class ReadingArguments
         DefaultValueFactory = _ => 20,
     };
 
+    /// <summary>The arguments that name files to read.</summary>
+    public IReadOnlyList<Symbol> Files => [_samples, _columns];
+
     /// <summary>Adds the arguments to a command.</summary>
     public void AddTo(Command command)
     {
+        UnknownOption.Refuse(_samples);
         command.Add(_samples);
         command.Add(_columns);
         command.Add(_acceptFlags);
@@ -58,7 +62,8 @@ internal sealed class ReadingArguments
         ColumnMatchFile? match = null;
         if (parse.GetValue(_columns) is { } path)
         {
-            Reading<ColumnMatchFile> reading = JsonFile.Read(path, "the column match", (bytes, name) => ColumnMatchFile.Read(bytes, name));
+            const string What = "the column match";
+            Reading<ColumnMatchFile> reading = NamedDocument.Read(path, What, file => JsonFile.Read(file, What, (bytes, name) => ColumnMatchFile.Read(bytes, name)));
             findings.AddRange(reading.Findings);
             if (reading.Value is null)
             {

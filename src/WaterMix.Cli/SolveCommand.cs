@@ -18,7 +18,7 @@ internal static class SolveCommand
     {
         var reading = new ReadingArguments();
         var model = new Option<string>("--model") { Description = "The mixing model.", HelpName = "MODEL.json", Required = true };
-        Option<string?> output = OutputOption.Create(required: false);
+        Option<string?> output = OutputOption.Table(required: false);
         var threads = new Option<int>("--threads") { Description = "Most threads at work; the result does not depend on it. Default: one per processor.", HelpName = "N", DefaultValueFactory = _ => Environment.ProcessorCount };
         threads.Validators.Add(result =>
         {
@@ -30,6 +30,7 @@ internal static class SolveCommand
         var proof = new Option<bool>("--proof") { Description = "Add kkt_violation: how far each answer is from the optimality conditions, recomputed from the whitened rows." };
         var command = new Command("solve", "Apportions every sample into the model's end-members, corrected for its processes.") { model, output, threads, proof };
         reading.AddTo(command);
+        OutputOption.MustNotBeRead(command, output, [model, .. reading.Files]);
         command.SetAction((parse, cancellation) => Task.Run(() => Run(
             reading.Samples(parse),
             findings => reading.Options(parse, findings),
@@ -43,7 +44,7 @@ internal static class SolveCommand
     {
         var clock = Stopwatch.StartNew();
         var findings = new List<Finding>();
-        Reading<MixingModel> reading = MixingModelFile.Read(modelPath);
+        Reading<MixingModel> reading = NamedDocument.Read(modelPath, "the mixing model", MixingModelFile.Read);
         findings.AddRange(reading.Findings);
         ReadingOptions? readingOptions = readOptions(findings);
         PreparedModel? model = reading.Value is null ? null : PreparedModel.From(reading.Value);
@@ -52,7 +53,7 @@ internal static class SolveCommand
             readingOptions = readingOptions with { NeededQuantities = model.InputIds, Prefer = model.Model.Prefer };
         }
 
-        using OpenedSamples samples = SampleReader.Open(paths, readingOptions ?? new ReadingOptions());
+        using OpenedSamples samples = SampleReader.Open(paths, (readingOptions ?? new ReadingOptions()) with { Cancellation = options.Cancellation });
         if (model is null || readingOptions is null || samples.HasErrors)
         {
             return Messages.NotUsable([.. findings, .. samples.Findings]);
@@ -65,7 +66,7 @@ internal static class SolveCommand
         }
 
         using var output = new OutputFile(outputPath);
-        SolveSummary summary = StreamedSolve.Run(samples, model, options, output.Stream, new SampleProgress("solved"));
+        SolveSummary summary = output.Write(stream => StreamedSolve.Run(samples, model, options, stream, new SampleProgress("solved")));
         findings.AddRange(summary.Findings);
         if (summary.HasErrors)
         {

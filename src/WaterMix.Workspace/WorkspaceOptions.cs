@@ -19,7 +19,7 @@ public sealed record WorkspaceOptions
     public TimeSpan KeepUnusedUploads { get; init; } = TimeSpan.FromDays(2);
 
     /// <summary>Samples in one piece of a run's work; small enough that the work of others and a cancellation wait 50 ms at most.</summary>
-    public int ChunkRows { get; init; } = 16_384;
+    public int ChunkRows { get; init; } = 8_192;
 
     /// <summary>Most threads at work on one piece.</summary>
     public int Threads { get; init; } = Environment.ProcessorCount;

@@ -5,20 +5,9 @@ namespace WaterMix.Cli.Tests;
 /// <summary>Whatever is wrong with an input, the command says what was expected, what was found and what to do, writes nothing and returns 2.</summary>
 public class BadInputTests
 {
-    private const string Header = "station,pressure,potential_temperature,practical_salinity,oxygen,nitrate,phosphate,silicate";
-    private const string Row = "1,2000,3.5,34.95,270,18,1.2,15";
-
-    private const string Model = """
-        {
-          "schema": "watermix/mixing-model/1", "name": "m",
-          "endMembers": { "schema": "watermix/end-member-set/1", "name": "s", "version": 1, "endMembers": [
-            { "id": "A", "name": "", "values": { "potential_temperature": 3, "practical_salinity": 34.9, "oxygen": 285, "silicate": 10 }, "provenance": { "kind": "manual" } },
-            { "id": "B", "name": "", "values": { "potential_temperature": -0.4, "practical_salinity": 34.66, "oxygen": 240, "silicate": 121 }, "provenance": { "kind": "manual" } } ] },
-          "tracers": ["potential_temperature", "practical_salinity", "oxygen"],
-          "fit": { "kind": "generalised-least-squares", "measurementSd": { "potential_temperature": 0.01, "practical_salinity": 0.005, "oxygen": 2 } },
-          "massConservation": { "kind": "exact" }
-        }
-        """;
+    private const string Header = SmallModel.Header;
+    private const string Row = SmallModel.Row;
+    private const string Model = SmallModel.Json;
 
     public static TheoryData<string, string, string> Samples => new()
     {

@@ -153,7 +153,7 @@ internal sealed partial class FileReader
         }
         catch (Exception e) when (e is IOException or InvalidDataException)
         {
-            _findings.Add(new Finding(Severity.Error, "a file that can be read to its end", e.Message, "Fetch or pack the file again.") { File = _file });
+            _findings.Add(UnreadableFile.Of(e, "a file that can be read to its end", "Fetch or pack the file again.", _file));
             _sawEnd = true;
             return false;
         }

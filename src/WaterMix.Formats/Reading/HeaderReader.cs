@@ -41,7 +41,7 @@ internal static class HeaderReader
         }
         catch (Exception e) when (e is IOException or InvalidDataException or UnauthorizedAccessException)
         {
-            findings.Add(new Finding(Severity.Error, "a file that can be read", e.Message, "Check the file, its permissions, or fetch it again.") { File = file.Name });
+            findings.Add(UnreadableFile.Of(e, "a file that can be read", "Check the file, its permissions, or fetch it again.", file.Name));
             return null;
         }
     }

@@ -45,11 +45,11 @@ public sealed class OpenedSamples : IDisposable
         Missing = _options.Match?.Missing ?? [],
     };
 
+    /// <summary>True where results name the file of each row: the input is several files, or a zip file even of one entry.</summary>
+    public bool NamesFiles => _plans.Count > 1 || _plans.Any(p => p.Header.File.IsZipEntry);
+
     /// <summary>The header names of the first file, in order.</summary>
     public IReadOnlyList<string> Headers => _plans.Count == 0 ? [] : [.. _plans[0].Header.Columns.Select(c => c.Name)];
-
-    /// <summary>True where the rows of several files run on, so that results name the file of each.</summary>
-    public bool HasSeveralFiles => _plans.Count > 1;
 
     /// <summary>What was made of the files, as far as the reading that was begun last came.</summary>
     public ImportReport Report => _tally.Report(_plans, _schema, Findings);

@@ -3,7 +3,7 @@ using WaterMix.Formats.Matching;
 
 namespace WaterMix.Formats.Reading;
 
-/// <summary>What the person says about the reading of sample files; every part has a default.</summary>
+/// <summary>What is said about the reading of sample files; every part has a default.</summary>
 public sealed record ReadingOptions
 {
     /// <summary>The flags with which a bottle or CTD value may become the merged value.</summary>
@@ -23,4 +23,7 @@ public sealed record ReadingOptions
     /// unknown unit of one of them is an error. Null: everything is looked at, and such a column is kept under its own name with a warning.
     /// </summary>
     public IReadOnlySet<string>? NeededQuantities { get; init; }
+
+    /// <summary>Ends the opening early, where it waits for what comes through a pipe.</summary>
+    public CancellationToken Cancellation { get; init; }
 }

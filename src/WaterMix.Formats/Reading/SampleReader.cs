@@ -6,15 +6,16 @@ namespace WaterMix.Formats.Reading;
 public static class SampleReader
 {
     /// <summary>Opens files: reads their headers, settles the columns, and hands out what then reads the rows.</summary>
-    /// <param name="paths">The files, in any order; they are read in ordinal order of their names.</param>
+    /// <param name="paths">The files, in any order; they are read in ordinal order of their names. What cannot be read twice (a pipe) is kept in a temporary file.</param>
     /// <param name="options">What the person says about them.</param>
     /// <returns>The opened samples; <see cref="OpenedSamples.HasErrors"/> says whether they are usable so far.</returns>
+    /// <exception cref="OperationCanceledException">The work was cancelled (<see cref="ReadingOptions.Cancellation"/>).</exception>
     public static OpenedSamples Open(IReadOnlyList<string> paths, ReadingOptions options)
     {
         ArgumentNullException.ThrowIfNull(paths);
         ArgumentNullException.ThrowIfNull(options);
         var findings = new FindingList();
-        InputFiles inputs = InputFiles.Find(paths, findings);
+        InputFiles inputs = InputFiles.Find(paths, findings, options.Cancellation);
         return Open(inputs.Files, options, new SeawaterPerKilogram(), findings, inputs);
     }
 
@@ -26,7 +27,7 @@ public static class SampleReader
         ArgumentNullException.ThrowIfNull(files);
         ArgumentNullException.ThrowIfNull(options);
         var findings = new FindingList();
-        InputFiles inputs = InputFiles.Find(files, findings);
+        InputFiles inputs = InputFiles.Find(files, findings, options.Cancellation);
         return Open(inputs.Files, options, new SeawaterPerKilogram(), findings, inputs);
     }
 

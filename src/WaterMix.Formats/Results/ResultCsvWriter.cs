@@ -21,7 +21,7 @@ public sealed class ResultCsvWriter : IDisposable
     /// <summary>A writer to a stream, which stays open.</summary>
     /// <param name="stream">Where the text goes.</param>
     /// <param name="model">The model that makes the results.</param>
-    /// <param name="namesFiles">True where there are several inputs: <c>file, file_row</c> come first.</param>
+    /// <param name="namesFiles">True where the rows name their file (<see cref="OpenedSamples.NamesFiles"/>): <c>file, file_row</c> come first.</param>
     /// <param name="withProof">True to add <c>kkt_violation</c>.</param>
     public ResultCsvWriter(Stream stream, PreparedModel model, bool namesFiles, bool withProof)
     {

@@ -1,6 +1,7 @@
 using System.Globalization;
 using WaterMix.Core;
 using WaterMix.Core.Mixing;
+using WaterMix.Core.Quantities;
 using WaterMix.Core.Samples;
 using WaterMix.Core.Seawater;
 using WaterMix.Formats.Json;
@@ -39,7 +40,7 @@ public static class StreamedSolve
         ArgumentNullException.ThrowIfNull(samples);
         ArgumentNullException.ThrowIfNull(options);
         using var hash = new SampleHash();
-        using var csv = new ResultCsvWriter(output, model, samples.HasSeveralFiles, options.WithProof);
+        using var csv = new ResultCsvWriter(output, model, samples.NamesFiles, options.WithProof);
         long[] statuses = new long[Enum.GetValues<SolveStatus>().Length];
         long[] usable = new long[model.ParentIds.Count];
         var notes = new List<Finding>();
@@ -61,9 +62,25 @@ public static class StreamedSolve
         return new SolveSummary(
             rows,
             Enum.GetValues<SolveStatus>().Where(s => statuses[(int)s] > 0).ToDictionary(s => s, s => statuses[(int)s]),
-            [.. samples.Findings, .. notes, .. unusable],
+            [.. samples.Findings, .. UntestableConditions(samples, model), .. notes, .. unusable],
             hash.Finish(),
             violation);
+    }
+
+    // A condition on what no input can tell is false for every sample: a whole layer stays empty, or a process is off, and no row says why.
+    private static IEnumerable<Finding> UntestableConditions(OpenedSamples samples, PreparedModel model)
+    {
+        string[] eos80 = [Quantity.PotentialTemperature.Id, Quantity.PracticalSalinity.Id];
+        SampleTable derived = SampleDerivation.Derive(samples.Schema, [.. model.QuantityIds, .. eos80]).Table;
+        IEnumerable<(Condition Condition, string Of)> uses = model.Model.LayersOrAll.SelectMany(l => l.Where.Select(c => (c, $"layer {l.Id}")))
+            .Concat(model.Model.Processes.SelectMany(p => p.Where.Select(c => (c, $"process {p.Id}"))));
+        return uses.GroupBy(use => (use.Condition.Quantity, use.Condition.Scale), use => use.Of)
+            .Where(g => (g.Key.Scale == DensityScale.Eos80 ? eos80 : [g.Key.Quantity]).Any(id => derived.Find(id) is null))
+            .Select(g => new Finding(
+                Severity.Warning,
+                $"a column of {g.Key.Quantity}, which the conditions of {string.Join(", ", g.Distinct())} test",
+                "none in the samples, nor what it could be derived from",
+                $"Such a condition never holds: no sample is in the layer, and the process is off. Match a column to {g.Key.Quantity} (--columns), or take the condition out of the model."));
     }
 
     private static void Count(SolvedBlock solved, long[] statuses, long[] usable)

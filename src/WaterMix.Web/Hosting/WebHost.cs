@@ -40,6 +40,7 @@ internal static class WebHost
             circuits.DisconnectedCircuitRetentionPeriod = TimeSpan.FromMinutes(30);
         }).AddHubOptions(hub => hub.MaximumReceiveMessageSize = 512 << 10); // A lasso's corners, at most; samples never come this way.
         services.AddRadzenComponents();
+        services.AddScoped<WaterMix.Web.State.Mixing.DraftEditors>();
         services.AddProblemDetails(ApiRoutes.Explain);
         services.AddOpenApi(ApiRoutes.Describe);
         services.AddSingleton<ScratchFolders>();

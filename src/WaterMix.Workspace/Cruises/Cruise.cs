@@ -6,7 +6,7 @@ namespace WaterMix.Workspace.Cruises;
 /// <summary>The samples of one import, kept apart from other cruises'.</summary>
 /// <param name="Id">The cruise.</param>
 /// <param name="Name">Its name.</param>
-/// <param name="SamplesHash">SHA-256 of the samples; the key to <see cref="ICruises.SamplesAsync"/>.</param>
+/// <param name="SamplesHash">The key to <see cref="ICruises.SamplesAsync"/>: SHA-256 of the samples, with 16 more digits where other samples have the same values but other names, origins or files.</param>
 /// <param name="SampleCount">Number of samples.</param>
 /// <param name="Upload">The upload it was read from.</param>
 /// <param name="Report">The import report.</param>
@@ -18,4 +18,8 @@ public sealed record Cruise(
     long SampleCount,
     Guid Upload,
     ImportReport Report,
-    IReadOnlyDictionary<string, MeasurementError>? MeasurementSd);
+    IReadOnlyDictionary<string, MeasurementError>? MeasurementSd)
+{
+    /// <summary>The options it was read with, to begin from when it is read again.</summary>
+    public ReadingOptions Reading { get; init; } = new();
+}

@@ -8,13 +8,13 @@ namespace WaterMix.Workspace.Cruises;
 /// <param name="Columns">The quantity columns, in order.</param>
 /// <param name="HasBottleFlags">True where there is a column of bottle flags.</param>
 /// <param name="Files">The files' rows.</param>
-/// <param name="HasSeveralFiles">True where more than one file was read.</param>
+/// <param name="NamesFiles">True where results name the file of each row.</param>
 internal sealed record SampleFileHeader(
     IReadOnlyList<string> Identity,
     IReadOnlyList<SampleFileHeader.Column> Columns,
     bool HasBottleFlags,
     IReadOnlyList<FileRows> Files,
-    bool HasSeveralFiles)
+    bool NamesFiles)
 {
     /// <summary>The name under which a file keeps its header.</summary>
     public const string Kind = "watermix/samples/1";

@@ -31,7 +31,7 @@ internal static class SampleFileReader
             columns.Add(column.With(values, flags, origins));
         }
 
-        return new KeptSamples(new SampleTable(file.RowCount, identity, columns, bottleFlags), header.Files, header.HasSeveralFiles);
+        return new KeptSamples(new SampleTable(file.RowCount, identity, columns, bottleFlags), header.Files, header.NamesFiles);
     }
 
     private static IdentityColumn Coded(string id, string?[] names)

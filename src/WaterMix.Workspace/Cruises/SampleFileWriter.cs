@@ -83,16 +83,16 @@ internal sealed class SampleFileWriter : IAsyncDisposable
     }
 
     /// <summary>Ends the file.</summary>
-    /// <param name="hasSeveralFiles">True where more than one file was read.</param>
+    /// <param name="namesFiles">True where results name the file of each row.</param>
     /// <returns>The hash of the samples.</returns>
-    public async Task<string> FinishAsync(bool hasSeveralFiles)
+    public async Task<string> FinishAsync(bool namesFiles)
     {
         if (_filled > 0)
         {
             await FlushAsync();
         }
 
-        await _file.FinishAsync(SampleFileHeader.Kind, (_header with { Files = _files, HasSeveralFiles = hasSeveralFiles }).Write());
+        await _file.FinishAsync(SampleFileHeader.Kind, (_header with { Files = _files, NamesFiles = namesFiles }).Write());
         return _hash.Finish();
     }
 

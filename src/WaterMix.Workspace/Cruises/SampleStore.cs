@@ -42,7 +42,7 @@ internal sealed partial class SampleStore(DataFolder folder, ByteCache cache)
             return (null, writer.RowCount);
         }
 
-        string hash = await writer.FinishAsync(opened.HasSeveralFiles);
+        string hash = await writer.FinishAsync(opened.NamesFiles);
         await file.CloseAsync();
         return (await PlaceAsync(file, hash), writer.RowCount);
     }

@@ -32,8 +32,7 @@ internal static class UploadName
             throw new ArgumentException("Expected a file with a name; the name given is empty. Rename the file and upload it again.", nameof(given));
         }
 
-        // The end of a name tells more than its middle: the extension is there.
-        return name.Length <= MostCharacters ? name : string.Concat(name.AsSpan(0, MostCharacters - 20).TrimEnd('\ud800'), "~", name.AsSpan(name.Length - 16));
+        return name.Length <= MostCharacters ? name : Shortened(name);
     }
 
     /// <summary>The name, with a number where another file of the upload has it already.</summary>
@@ -47,5 +46,16 @@ internal static class UploadName
         }
 
         return candidate;
+    }
+
+    // The end of a name tells more than its middle: the extension is there.
+    private static string Shortened(string name)
+    {
+        int first = MostCharacters - 20;
+        int last = name.Length - 16;
+        return string.Concat(
+            name.AsSpan(0, char.IsHighSurrogate(name[first - 1]) ? first - 1 : first),
+            "~",
+            name.AsSpan(char.IsLowSurrogate(name[last]) ? last + 1 : last));
     }
 }

@@ -20,7 +20,7 @@ internal static class RunCsv
     public static async Task WriteAsync(MixingModel model, IReadOnlyList<(KeptSamples Samples, MixingResult Result)> cruises, Stream output, CancellationToken cancellation)
     {
         string[] identity = [.. IdentityColumn.Ids.Where(id => cruises.Any(c => c.Samples.Table.Identity.Any(i => i.Id == id)))];
-        bool namesFiles = cruises.Count > 1 || cruises[0].Samples.HasSeveralFiles;
+        bool namesFiles = cruises.Count > 1 || cruises[0].Samples.NamesFiles;
         using var text = new MemoryStream();
         using (var csv = new ResultCsvWriter(text, PreparedModel.From(model), namesFiles, withProof: false))
         {

@@ -1,4 +1,5 @@
 using System.Collections.Concurrent;
+using System.Data.Common;
 using System.Globalization;
 using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.Hosting;
@@ -16,6 +17,8 @@ namespace WaterMix.Workspace.Runs;
 internal sealed partial class RunWorker(WorkspaceDatabase database, SampleStore samples, RunStore store, SolverPool pool, WorkspaceEvents events, WorkspaceOptions options, ILogger<RunWorker> log)
     : BackgroundService
 {
+    private static readonly TimeSpan Pause = TimeSpan.FromSeconds(5);
+
     private readonly SemaphoreSlim _wake = new(0);
     private readonly ConcurrentDictionary<Guid, ActiveRun> _active = new();
 
@@ -39,6 +42,11 @@ internal sealed partial class RunWorker(WorkspaceDatabase database, SampleStore 
     public override void Dispose()
     {
         _wake.Dispose();
+        foreach (ActiveRun run in _active.Values)
+        {
+            run.Dispose();
+        }
+
         base.Dispose();
     }
 
@@ -47,16 +55,25 @@ internal sealed partial class RunWorker(WorkspaceDatabase database, SampleStore 
     {
         while (!stoppingToken.IsCancellationRequested)
         {
-            await TakeNewRunsAsync(stoppingToken);
-            if (_active.IsEmpty)
+            try
             {
-                await _wake.WaitAsync(stoppingToken);
-                continue;
-            }
+                await TakeNewRunsAsync(stoppingToken);
+                if (_active.IsEmpty)
+                {
+                    await _wake.WaitAsync(stoppingToken);
+                    continue;
+                }
 
-            foreach (ActiveRun run in _active.Values.OrderBy(r => r.Row.Started))
+                foreach (ActiveRun run in _active.Values.OrderBy(r => r.Row.Started))
+                {
+                    await StepAsync(run, stoppingToken);
+                }
+            }
+            catch (Exception fault) when (fault is DbException or DbUpdateException or IOException)
             {
-                await StepAsync(run, stoppingToken);
+                // A full disk, say: not even the failure could be written down.
+                StorageFailed(fault);
+                await Task.Delay(Pause, stoppingToken);
             }
         }
     }
@@ -204,6 +221,9 @@ internal sealed partial class RunWorker(WorkspaceDatabase database, SampleStore 
     // A run that was cancelled meanwhile stays cancelled.
     private static IQueryable<RunRow> AtWork(WorkspaceDbContext context, ActiveRun run) =>
         context.Runs.Where(r => r.Id == run.Row.Id && (r.State == RunState.Waiting || r.State == RunState.Running));
+
+    [LoggerMessage(Level = LogLevel.Error, Message = "The data folder cannot be read or written; it is tried again in five seconds.")]
+    private partial void StorageFailed(Exception fault);
 
     [LoggerMessage(Level = LogLevel.Error, Message = "Run {Run} failed.")]
     private partial void RunFailed(Exception fault, Guid run);

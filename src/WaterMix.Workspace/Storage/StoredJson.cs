@@ -66,7 +66,10 @@ internal static class StoredJson
         row.SampleCount,
         row.Upload,
         ImportReportJson.Read(row.Report),
-        Errors(row.MeasurementSd));
+        Errors(row.MeasurementSd))
+    {
+        Reading = Reading(row.Reading),
+    };
 
     /// <summary>A run of a row.</summary>
     public static Runs.Run Run(RunRow row) => new(

@@ -23,14 +23,14 @@ public sealed class InputFilesTests : IDisposable
         using OpenedSamples opened = SampleReader.Open([.. paths.Select(p => Path.Combine(_folder, p))], new ReadingOptions());
         (List<SampleBlock> blocks, _, _) = ReadingHelp.ReadAll(opened);
 
-        Assert.True(opened.HasSeveralFiles);
+        Assert.True(opened.NamesFiles);
         Assert.Equal(["B.csv", "a10.csv", "a9.csv", "b.csv"], blocks.Select(b => b.File));
         Assert.Equal([1, 3, 5, 7], blocks.Select(b => b.FirstRow));
         Assert.All(blocks, b => Assert.Equal(1, b.FirstFileRow));
     }
 
     [Fact]
-    public void Open_ZipOfCasts_ReadsEntriesByNameWithoutTheirFolders()
+    public void Open_ZipOfCasts_ReadsEntriesByNameAndLabelsThemWithTheirPaths()
     {
         string path = Zip(("deep/b.csv", Cast("2")), ("../../a.csv", Cast("1")), ("read.me", "hello"), ("deep/", ""));
 
@@ -38,7 +38,7 @@ public sealed class InputFilesTests : IDisposable
         (List<SampleBlock> blocks, ImportReport report, _) = ReadingHelp.ReadAll(opened);
 
         Assert.False(opened.HasErrors, string.Join("\n", opened.Findings));
-        Assert.Equal(["casts.zip/a.csv", "casts.zip/b.csv"], blocks.Select(b => b.File));
+        Assert.Equal(["casts.zip/../../a.csv", "casts.zip/deep/b.csv"], blocks.Select(b => b.File));
         Assert.Equal(["1", "2"], blocks.Select(b => b.Table.Identity[0][0]));
         Assert.Equal(1, report.Findings.Single(f => f.Severity == Severity.Note).Count);
     }
@@ -80,6 +80,32 @@ public sealed class InputFilesTests : IDisposable
         using OpenedSamples opened = SampleReader.Open([path], new ReadingOptions());
 
         Assert.Equal("a whole zip file", ReadingHelp.Error(opened.Findings).Expected);
+    }
+
+    [Fact]
+    public void Open_ZipOfOneEntry_NamesItsFile()
+    {
+        using OpenedSamples opened = SampleReader.Open([Zip(("a.csv", Cast("1")))], new ReadingOptions());
+
+        Assert.True(opened.NamesFiles);
+    }
+
+    [Fact]
+    public void Open_SecondEntryOfOneName_IsAWarning()
+    {
+        using OpenedSamples opened = SampleReader.Open([Zip(("a.csv", Cast("1")), ("a.csv", Cast("2")))], new ReadingOptions());
+
+        Finding finding = Assert.Single(opened.Findings);
+        Assert.Equal((Severity.Warning, "casts.zip/a.csv"), (finding.Severity, finding.File));
+        Assert.Equal(2, ReadingHelp.ReadAll(opened).Blocks.Count);
+    }
+
+    [Fact]
+    public void Open_FileThatDoesNotExist_IsASentenceWithOneFullStop()
+    {
+        using OpenedSamples opened = SampleReader.Open([Path.Combine(_folder, "absent.csv")], new ReadingOptions());
+
+        Assert.EndsWith("absent.csv'. Check the path and the permissions.", ReadingHelp.Error(opened.Findings).ToString(), StringComparison.Ordinal);
     }
 
     private static string Cast(string station) =>

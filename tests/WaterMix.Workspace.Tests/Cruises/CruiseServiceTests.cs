@@ -110,7 +110,7 @@ public class CruiseServiceTests
         Cruise cruise = await workspace.KeepAsync(study, "c", ("z.zip", zip.ToArray()), ("halcyon_00022_00001_ct1.csv", OpenWorkspace.Sample("casts/halcyon_00022_00001_ct1.csv")));
         KeptSamples kept = await workspace.Get<SampleStore>().FindAsync(cruise.SamplesHash);
 
-        Assert.True(kept.HasSeveralFiles);
+        Assert.True(kept.NamesFiles);
         Assert.Equal(["halcyon_00022_00001_ct1.csv", "z.zip/halcyon_00004_00001_ct1.csv", "z.zip/halcyon_00012_00001_ct1.csv"], kept.Files.Select(f => f.File));
         Assert.Equal(cruise.SampleCount, kept.Files.Sum(f => f.Count));
     }
@@ -137,6 +137,7 @@ public class CruiseServiceTests
     [InlineData("C:\\data\\a\u202Efdp.csv", "afdp.csv")]
     [InlineData("a\u0000b\n.csv", "ab.csv")]
     [InlineData("<b>x</b>.csv", "b>.csv")]
+    [InlineData("=cmd|' /C calc'!A0.csv", "C calc'!A0.csv")]
     public async Task Receive_NamesThatMeanHarm_BecomeHarmless(string given, string kept)
     {
         using var scratch = new Scratch();
@@ -147,6 +148,18 @@ public class CruiseServiceTests
 
         Assert.Equal(kept, Assert.Single(trial.Report.Files).Name);
         Assert.Equal(["00001"], Directory.GetFiles(scratch.Path("uploads"), "*", SearchOption.AllDirectories).Select(Path.GetFileName));
+    }
+
+    [Theory]
+    [InlineData(130)]
+    [InlineData(131)]
+    public void Harmless_ALongName_IsCutBetweenCharacters(int characters)
+    {
+        string name = UploadName.Harmless(string.Concat(Enumerable.Repeat("\U0001F41F", characters)) + "a.csv");
+
+        Assert.InRange(name.Length, 100, 120);
+        Assert.EndsWith("a.csv", name, StringComparison.Ordinal);
+        Assert.DoesNotContain('\uFFFD', Encoding.UTF8.GetString(Encoding.UTF8.GetBytes(name)));
     }
 
     [Theory]

@@ -74,7 +74,7 @@ public class LiveSolverTests
     public async Task Solve_WhileARunIsAtWork_GoesFirst()
     {
         using var scratch = new Scratch();
-        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder, new WorkspaceOptions { ChunkRows = 1 });
+        await using OpenWorkspace workspace = await OpenWorkspace.AtAsync(scratch.Folder, new WorkspaceOptions { ChunkRows = 8 });
         Guid study = await RunServiceTests.HalcyonStudyAsync(workspace);
         Guid run = await workspace.Runs.StartAsync(study, "r");
 

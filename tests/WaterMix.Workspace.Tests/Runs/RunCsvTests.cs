@@ -15,7 +15,7 @@ public class RunCsvTests
     [Theory]
     [InlineData(16_384)]
     [InlineData(100)]
-    [InlineData(1)]
+    [InlineData(31)]
     public async Task WriteCsv_OneCruise_IsWhatTheCommandLineWrites(int chunkRows)
     {
         (string, byte[]) file = ("halcyon_hy1.csv", OpenWorkspace.Sample("halcyon_hy1.csv"));

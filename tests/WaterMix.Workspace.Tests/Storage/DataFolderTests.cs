@@ -18,6 +18,15 @@ public class DataFolderTests
     }
 
     [Fact]
+    public async Task StartOfASecondApp_OnTheSameFolder_IsRefused()
+    {
+        using var scratch = new Scratch();
+        await using OpenWorkspace first = await OpenWorkspace.AtAsync(scratch.Folder);
+
+        await Assert.ThrowsAsync<DataFolderInUseException>(() => OpenWorkspace.AtAsync(scratch.Folder));
+    }
+
+    [Fact]
     public void Open_AfterDispose_Opens()
     {
         using var scratch = new Scratch();
