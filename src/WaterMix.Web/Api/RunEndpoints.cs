@@ -1,5 +1,4 @@
 using Microsoft.AspNetCore.Http.HttpResults;
-using Microsoft.AspNetCore.Mvc;
 using WaterMix.Formats.EndMemberSets;
 using WaterMix.Formats.MixingModels;
 using WaterMix.Workspace.Runs;
@@ -39,7 +38,7 @@ internal static class RunEndpoints
             : Missing(id);
 
     /// <summary>The end-member set of a run.</summary>
-    public static async Task<Results<FileContentHttpResult, ProblemHttpResult>> EndMembersAsync(Guid id, [FromServices] IRuns runs) =>
+    public static async Task<Results<FileContentHttpResult, ProblemHttpResult>> EndMembersAsync(Guid id, IRuns runs) =>
         await runs.FindAsync(id) is { } run
             ? TypedResults.File(EndMemberSetFile.Write(run.Model.EndMembers), "application/json", "set.endmembers.json")
             : Missing(id);

@@ -37,4 +37,11 @@ public sealed record TablePage(IReadOnlyList<ResultColumn> Columns, IReadOnlyLis
 /// <param name="Row">The row of all cruises, from 0.</param>
 /// <param name="Name">The sample in words.</param>
 /// <param name="Cells">The texts, one per column.</param>
-public sealed record TableLine(int Row, string Name, IReadOnlyList<string> Cells);
+public sealed record TableLine(int Row, string Name, IReadOnlyList<string> Cells)
+{
+    /// <summary>The row as people and result files count it, from 1.</summary>
+    public string Number => PlainText.Count(Row + 1L);
+
+    /// <summary>What the line's button is called.</summary>
+    public string Label => $"{Number}, card of {Name}";
+}
