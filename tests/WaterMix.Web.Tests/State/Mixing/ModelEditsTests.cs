@@ -1,5 +1,4 @@
 using WaterMix.Core;
-using WaterMix.Core.EndMembers;
 using WaterMix.Core.Mixing;
 using WaterMix.Web.State.Mixing;
 
