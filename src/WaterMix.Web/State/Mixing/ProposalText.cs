@@ -13,7 +13,7 @@ public static class ProposalText
     {
         string also = means > 0 ? $" {PlainText.Count(means, "value is a mean", "values are means")} of replicates (flag 6); their scatter is not in the file." : "";
         return proposal is null
-            ? $"Fewer than {PlainText.Count(ErrorProposals.FewestPairs)} pairs of bottles closed at one pressure.{also}"
+            ? $"fewer than {PlainText.Count(ErrorProposals.FewestPairs)} pairs of bottles closed at one pressure.{also}"
             : $"{Sd(proposal, unit)} from {PlainText.Count(proposal.Pairs, "pair", "pairs")} of bottles closed at one pressure; half of them differ by less than {WithUnit(proposal.MedianAbsolute, unit)}.{also}";
     }
 
@@ -21,7 +21,7 @@ public static class ProposalText
     /// <param name="proposal">The proposal, or null where there are too few pairs.</param>
     /// <param name="unit">The unit as people write it.</param>
     public static string BottleAndCtd(ErrorProposal? proposal, string unit) => proposal is null
-        ? $"Fewer than {PlainText.Count(ErrorProposals.FewestPairs)} samples with both a bottle and a CTD value."
+        ? $"fewer than {PlainText.Count(ErrorProposals.FewestPairs)} samples with both a bottle and a CTD value."
         : $"{Sd(proposal, unit)} from {PlainText.Count(proposal.Pairs, "sample", "samples")} with both; bottle less CTD has the median {WithUnit(proposal.Offset, unit)}, and half of the differences lie within {WithUnit(proposal.MedianAbsolute, unit)} of it. It holds the errors of both instruments.";
 
     /// <summary>The proposed number, rounded to two digits as an error deserves.</summary>
