@@ -1,5 +1,6 @@
 using Microsoft.AspNetCore.Connections;
 using WaterMix.Web.Hosting;
+using WaterMix.Workspace.Demo;
 using WaterMix.Workspace.Storage;
 
 // A published app finds its files beside it, wherever it is started from.
@@ -20,6 +21,7 @@ try
 
     await using WebApplication app = WebHost.Build(builder);
     DataFolder folder = app.Services.GetRequiredService<DataFolder>();
+    await DemoStudy.EnsureAsync(app.Services);
     StartMessages.Announce(app, folder, warning);
     await app.RunAsync();
     return 0;

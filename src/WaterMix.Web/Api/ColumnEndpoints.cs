@@ -1,4 +1,3 @@
-using Microsoft.AspNetCore.Mvc;
 using System.Globalization;
 using WaterMix.Core.Samples;
 using WaterMix.Workspace.Cruises;
@@ -73,7 +72,7 @@ internal static class ColumnEndpoints
     /// <param name="runs">The runs.</param>
     /// <param name="context">The request.</param>
     /// <param name="cruise">One cruise of the run; all unless given.</param>
-    public static async Task<IResult> OfRunAsync(Guid id, string ids, [FromServices] IRuns runs, HttpContext context, Guid? cruise = null)
+    public static async Task<IResult> OfRunAsync(Guid id, string ids, IRuns runs, HttpContext context, Guid? cruise = null)
     {
         if (await runs.FindAsync(id) is not { } run)
         {

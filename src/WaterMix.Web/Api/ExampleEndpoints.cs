@@ -2,14 +2,15 @@ using System.Text;
 using Microsoft.AspNetCore.Http.HttpResults;
 using WaterMix.Formats.Csv;
 using WaterMix.Formats.Reading;
+using WaterMix.Workspace.Demo;
 
 namespace WaterMix.Web.Api;
 
 /// <summary><c>GET /api/examples/{format}</c>: a small file of each sample format, cut from the invented cruise.</summary>
 internal static class ExampleEndpoints
 {
-    private const string Bottle = "bottle.csv";
-    private const string Cast = "cast.csv";
+    private const string Bottle = "halcyon_hy1.csv";
+    private const string Cast = "casts/halcyon_00012_00001_ct1.csv";
     private const int RowsOfBottle = 48;
     private const int RowsOfCast = 60;
 
@@ -35,11 +36,9 @@ internal static class ExampleEndpoints
     private static FileContentHttpResult Csv(byte[] bytes, string name) => TypedResults.File(bytes, "text/csv; charset=utf-8", name);
 
     /// <summary>The beginning of an Exchange file: everything up to the units, this many rows, and the line that ends the data.</summary>
-    private static byte[] Start(string resource, int rows)
+    private static byte[] Start(string file, int rows)
     {
-        using Stream stream = typeof(ExampleEndpoints).Assembly.GetManifestResourceStream(resource)
-            ?? throw new InvalidOperationException($"The example {resource} is not in the build.");
-        using var reader = new StreamReader(stream);
+        using var reader = new StreamReader(InventedOcean.Open(file));
         var text = new StringBuilder();
         int left = int.MaxValue;
         while (left > 0 && reader.ReadLine() is { } line)

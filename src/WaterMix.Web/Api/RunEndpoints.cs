@@ -1,5 +1,4 @@
 using Microsoft.AspNetCore.Http.HttpResults;
-using Microsoft.AspNetCore.Mvc;
 using WaterMix.Formats.MixingModels;
 using WaterMix.Workspace.Runs;
 
@@ -19,11 +18,11 @@ internal static class RunEndpoints
     }
 
     /// <summary>A run.</summary>
-    public static async Task<Results<Ok<RunView>, ProblemHttpResult>> FindAsync(Guid id, [FromServices] IRuns runs) =>
+    public static async Task<Results<Ok<RunView>, ProblemHttpResult>> FindAsync(Guid id, IRuns runs) =>
         await runs.FindAsync(id) is { } run ? TypedResults.Ok(RunView.Of(run)) : Missing(id);
 
     /// <summary>The results of a finished run.</summary>
-    public static async Task<IResult> ResultsAsync(Guid id, [FromServices] IRuns runs) => await runs.FindAsync(id) switch
+    public static async Task<IResult> ResultsAsync(Guid id, IRuns runs) => await runs.FindAsync(id) switch
     {
         null => Missing(id),
         { State: RunState.Finished } => TypedResults.Stream(output => runs.WriteCsvAsync(id, output, CancellationToken.None), "text/csv; charset=utf-8", "results.csv"),
@@ -31,7 +30,7 @@ internal static class RunEndpoints
     };
 
     /// <summary>The model of a run, which the command line turns into the same results.</summary>
-    public static async Task<Results<FileContentHttpResult, ProblemHttpResult>> ModelAsync(Guid id, [FromServices] IRuns runs) =>
+    public static async Task<Results<FileContentHttpResult, ProblemHttpResult>> ModelAsync(Guid id, IRuns runs) =>
         await runs.FindAsync(id) is { } run
             ? TypedResults.File(MixingModelFile.Write(run.Model with { EndMembersFile = null }), "application/json", "model.mixmodel.json")
             : Missing(id);
