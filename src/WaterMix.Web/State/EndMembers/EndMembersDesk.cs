@@ -17,6 +17,7 @@ public sealed class EndMembersDesk(StudySamples samples)
     private LayerCensus? _census;
     private (FigureColumns Columns, string X, string Y, string Colour, string? Layer, IReadOnlyList<Layer> Layers)? _drawn;
     private bool[] _counts = [];
+    private (string? X, string? Y, string? Layer, string? Colour) _asked;
 
     /// <summary>The tracer along x.</summary>
     public string X { get; private set; } = Quantity.PracticalSalinity.Id;
@@ -57,7 +58,7 @@ public sealed class EndMembersDesk(StudySamples samples)
     /// <summary>True where a source can be moved: both axes show what end-members have values of, not something computed from it.</summary>
     public bool CanMove => Quantity.FindOrFurther(X).Use == TracerUse.Row && Quantity.FindOrFurther(Y).Use == TracerUse.Row;
 
-    /// <summary>Looks at a model in a plane.</summary>
+    /// <summary>Looks at a model in a plane. Costs nothing where all is as before.</summary>
     /// <param name="model">The model.</param>
     /// <param name="x">The tracer along x; null or unknown: a usual one.</param>
     /// <param name="y">The tracer along y.</param>
@@ -66,9 +67,16 @@ public sealed class EndMembersDesk(StudySamples samples)
     public void Look(MixingModel model, string? x, string? y, string? layer, string? colour)
     {
         ArgumentNullException.ThrowIfNull(model);
+        FigureColumns columns = samples.Columns(model);
+        if (_moving is null && ReferenceEquals(model, _present) && ReferenceEquals(columns, Columns) && _asked == (x, y, layer, colour))
+        {
+            return;
+        }
+
+        _asked = (x, y, layer, colour);
         _present = model;
         _moving = null;
-        Columns = samples.Columns(model);
+        Columns = columns;
         Axes = [.. model.Tracers.Concat(SetColumns.Of(model, [])).Distinct()];
         X = Chosen(x, [Quantity.PracticalSalinity.Id, Quantity.AbsoluteSalinity.Id]);
         Y = Chosen(y, [Quantity.PotentialTemperature.Id, Quantity.ConservativeTemperature.Id]);

@@ -11,9 +11,6 @@ public sealed record LayerPlot(FigureAxis X, FigureAxis Y, IReadOnlyList<FigureL
 {
     private static readonly PointShape[] Shapes = [PointShape.Circle, PointShape.Square, PointShape.Diamond, PointShape.Triangle, PointShape.TriangleDown, PointShape.Plus];
 
-    /// <summary>The colours of layers: three of the sources' set that no source of the same place has at hand would mislead, so layers have greys and the pencil.</summary>
-    private static readonly string[] Colours = ["--pencil", "--warning", "--ink", "--faint"];
-
     /// <summary>Draws.</summary>
     /// <param name="model">The model.</param>
     /// <param name="columns">The samples.</param>
@@ -25,10 +22,11 @@ public sealed record LayerPlot(FigureAxis X, FigureAxis Y, IReadOnlyList<FigureL
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(columns);
         ArgumentNullException.ThrowIfNull(census);
+        int first = model.EndMembers.EndMembers.Count; // Colours that no source has.
         FigureCategory[] categories =
         [
-            .. model.LayersOrAll.Select((layer, k) => new FigureCategory(layer.Id, Colours[k % Colours.Length], Shapes[k % Shapes.Length])),
-            new FigureCategory("in no layer", "--rule", PointShape.Plus),
+            .. model.LayersOrAll.Select((layer, k) => new FigureCategory(layer.Id, SourceColours.At(first + k), Shapes[k % Shapes.Length])),
+            new FigureCategory("in no layer", "--faint", PointShape.Plus),
         ];
         int[] codes = Array.ConvertAll(census.LayerOf, layer => layer < 0 ? categories.Length - 1 : layer);
         double[] xs = columns.Values(x);

@@ -13,16 +13,16 @@ public static class ProposalText
     {
         string also = means > 0 ? $" {PlainText.Count(means, "value is a mean", "values are means")} of replicates (flag 6); their scatter is not in the file." : "";
         return proposal is null
-            ? $"Fewer than {PlainText.Count(ErrorProposals.FewestPairs)} pairs of bottles closed at one pressure.{also}"
-            : $"{Sd(proposal, unit)} from {PlainText.Count(proposal.Pairs, "pair", "pairs")} of bottles closed at one pressure; half of them differ by less than {FigureText.WithUnit(proposal.MedianAbsolute, unit)}.{also}";
+            ? $"fewer than {PlainText.Count(ErrorProposals.FewestPairs)} pairs of bottles closed at one pressure.{also}"
+            : $"{Sd(proposal, unit)} from {PlainText.Count(proposal.Pairs, "pair", "pairs")} of bottles closed at one pressure; half of them differ by less than {WithUnit(proposal.MedianAbsolute, unit)}.{also}";
     }
 
     /// <summary>What bottle against CTD says.</summary>
     /// <param name="proposal">The proposal, or null where there are too few pairs.</param>
     /// <param name="unit">The unit as people write it.</param>
     public static string BottleAndCtd(ErrorProposal? proposal, string unit) => proposal is null
-        ? $"Fewer than {PlainText.Count(ErrorProposals.FewestPairs)} samples with both a bottle and a CTD value."
-        : $"{Sd(proposal, unit)} from {PlainText.Count(proposal.Pairs, "sample", "samples")} with both; bottle less CTD has the median {FigureText.WithUnit(proposal.Offset, unit)}, and half of the differences lie within {FigureText.WithUnit(proposal.MedianAbsolute, unit)} of it. It holds the errors of both instruments.";
+        ? $"fewer than {PlainText.Count(ErrorProposals.FewestPairs)} samples with both a bottle and a CTD value."
+        : $"{Sd(proposal, unit)} from {PlainText.Count(proposal.Pairs, "sample", "samples")} with both; bottle less CTD has the median {WithUnit(proposal.Offset, unit)}, and half of the differences lie within {WithUnit(proposal.MedianAbsolute, unit)} of it. It holds the errors of both instruments.";
 
     /// <summary>The proposed number, rounded to two digits as an error deserves.</summary>
     /// <param name="proposal">The proposal.</param>
@@ -42,6 +42,8 @@ public static class ProposalText
     {
         double sd = Rounded(proposal);
         string share = proposal.Typical > 0 && sd > 0 ? $" ({FigureText.Number(sd / proposal.Typical * 100, 2)} % of the median)" : "";
-        return $"{FigureText.WithUnit(sd, unit)}{share}";
+        return $"{$"{TypedNumber.Text(sd)} {unit}".TrimEnd()}{share}";
     }
+
+    private static string WithUnit(double value, string unit) => $"{FigureText.Number(value, 2)} {unit}".TrimEnd();
 }

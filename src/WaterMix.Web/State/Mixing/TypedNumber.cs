@@ -7,6 +7,8 @@ namespace WaterMix.Web.State.Mixing;
 /// <param name="Problem">What was expected and found; null where the number is good.</param>
 public sealed record TypedNumber(double? Value, string? Problem)
 {
+    private const int LongestShown = 9;
+
     /// <summary>Reads what was typed. A hyphen and a true minus sign are the same; spaces around do not matter.</summary>
     /// <param name="text">The text.</param>
     /// <param name="rule">What is possible.</param>
@@ -37,6 +39,14 @@ public sealed record TypedNumber(double? Value, string? Problem)
     /// <summary>A number as it stands in a field: all its digits, a true minus sign; empty where there is none.</summary>
     /// <param name="value">The number, or null.</param>
     public static string Text(double? value) => value?.ToString("R", CultureInfo.InvariantCulture).Replace('-', '\u2212') ?? "";
+
+    /// <summary>A number as a field shows it: as <see cref="Text"/>, but a long one, such as the outcome of a conversion, in seven digits.</summary>
+    /// <param name="value">The number, or null.</param>
+    public static string Shown(double? value)
+    {
+        string all = Text(value);
+        return all.Length <= LongestShown ? all : value!.Value.ToString("G7", CultureInfo.InvariantCulture).Replace('-', '\u2212');
+    }
 
     /// <summary>A fraction as per cent, without the rounding of a multiplication in binary.</summary>
     /// <param name="fraction">The fraction, or null.</param>

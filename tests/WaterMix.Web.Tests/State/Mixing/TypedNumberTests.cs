@@ -50,4 +50,10 @@ public class TypedNumberTests
         Assert.Equal("0.7", TypedNumber.Text(TypedNumber.PerCent(0.007)));
         Assert.Equal(0.007, TypedNumber.Fraction(0.7));
     }
+
+    [Theory]
+    [InlineData(15.524414729720636, "15.52441")]
+    [InlineData(-0.25, "\u22120.25")]
+    [InlineData(123456789, "123456789")]
+    public void Shown_ALongNumber_HasSevenDigits(double value, string shown) => Assert.Equal(shown, TypedNumber.Shown(value));
 }
