@@ -138,6 +138,9 @@ internal sealed class InputFiles : IDisposable
             && ((magic[2] == 3 && magic[3] == 4) || (magic[2] == 5 && magic[3] == 6));
     }
 
+    // An entry's path as a label: steps that lead nowhere or upwards are no part of it.
+    private static string Inside(string path) => string.Join('/', path.Split('/', '\\').Where(step => step is not ("" or "." or "..")));
+
     private void AddArchive(Func<Stream> open, string name, FindingList findings)
     {
         var archive = new ZipArchive(open(), ZipArchiveMode.Read);
@@ -161,7 +164,7 @@ internal sealed class InputFiles : IDisposable
             }
 
             tabular++;
-            string label = $"{name}/{entry.FullName}";
+            string label = $"{name}/{Inside(entry.FullName)}";
             if (!labels.Add(label))
             {
                 findings.Add(new Finding(Severity.Warning, "every entry of a zip file once", "a second entry of this name", "The rows of both are read; pack the archive again if one is an older copy.") { File = label });

@@ -111,7 +111,7 @@ public class CruiseServiceTests
         KeptSamples kept = await workspace.Get<SampleStore>().FindAsync(cruise.SamplesHash);
 
         Assert.True(kept.NamesFiles);
-        Assert.Equal(["halcyon_00022_00001_ct1.csv", "z.zip/halcyon_00004_00001_ct1.csv", "z.zip/halcyon_00012_00001_ct1.csv"], kept.Files.Select(f => f.File));
+        Assert.Equal(["halcyon_00022_00001_ct1.csv", "z.zip/deep/halcyon_00004_00001_ct1.csv", "z.zip/deep/halcyon_00012_00001_ct1.csv"], kept.Files.Select(f => f.File));
         Assert.Equal(cruise.SampleCount, kept.Files.Sum(f => f.Count));
     }
 
