@@ -41,6 +41,7 @@ internal static class WebHost
         }).AddHubOptions(hub => hub.MaximumReceiveMessageSize = 512 << 10); // A lasso's corners, at most; samples never come this way.
         services.AddRadzenComponents();
         services.AddProblemDetails(ApiRoutes.Explain);
+        services.Configure<RouteHandlerOptions>(routes => routes.ThrowOnBadRequest = false); // A bad request is an answer, in every environment.
         services.AddOpenApi(ApiRoutes.Describe);
         services.AddSingleton<ScratchFolders>();
         services.AddHealthChecks();
