@@ -43,7 +43,7 @@ internal static class ColumnEndpoints
         {
             samples = await cruises.SamplesAsync(hash);
         }
-        catch (Exception fault) when (fault is ArgumentException or IOException)
+        catch (Exception fault) when (fault is ArgumentException or { InnerException: FileNotFoundException })
         {
             return Problems.NotFound($"There are no samples {hash}. GET /api/studies/{{id}} gives the samplesHash of each cruise.");
         }

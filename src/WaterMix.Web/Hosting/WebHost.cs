@@ -42,6 +42,7 @@ internal static class WebHost
         services.AddRadzenComponents();
         services.AddScoped<WaterMix.Web.State.Mixing.DraftEditors>();
         services.AddProblemDetails(ApiRoutes.Explain);
+        services.Configure<RouteHandlerOptions>(routes => routes.ThrowOnBadRequest = false); // A bad request is an answer, in every environment.
         services.AddOpenApi(ApiRoutes.Describe);
         services.AddSingleton<ScratchFolders>();
         services.AddHealthChecks();

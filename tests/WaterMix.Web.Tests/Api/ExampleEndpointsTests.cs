@@ -4,7 +4,7 @@ using WaterMix.Formats.Reading;
 
 namespace WaterMix.Web.Tests.Api;
 
-public sealed class ExampleEndpointsTests(RunningApp app) : IClassFixture<RunningApp>
+public sealed class ExampleEndpointsTests(RunningApp app)
 {
     [Theory]
     [InlineData("exchange-bottle")]

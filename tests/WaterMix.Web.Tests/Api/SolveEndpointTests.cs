@@ -9,7 +9,7 @@ using WaterMix.Workspace.Demo;
 
 namespace WaterMix.Web.Tests.Api;
 
-public sealed class SolveEndpointTests(RunningApp app) : IClassFixture<RunningApp>
+public sealed class SolveEndpointTests(RunningApp app, SmallUploadsApp small)
 {
     private static readonly (string, string, byte[]) Samples = ("samples", "halcyon_hy1.csv", InventedOcean.Read("halcyon_hy1.csv"));
     private static readonly (string, string, byte[]) Model = ("model", "halcyon.mixmodel.json", InventedOcean.Read("halcyon.mixmodel.json"));
@@ -86,8 +86,7 @@ public sealed class SolveEndpointTests(RunningApp app) : IClassFixture<RunningAp
     [Fact]
     public async Task Solve_LargerThanTheLimit_RefusedWithTheLimit()
     {
-        using RunningApp small = new RunningApp().WithSetting("WATERMIX_UPLOAD_LIMIT_MB", "1");
-        using HttpClient client = small.CreateClient();
+        using HttpClient client = small.App.CreateClient();
         using MultipartFormDataContent form = Answers.Form(("samples", "a.csv", new byte[2 << 20]));
         using HttpResponseMessage answer = await client.PostAsync("/api/solve", form, TestContext.Current.CancellationToken);
 

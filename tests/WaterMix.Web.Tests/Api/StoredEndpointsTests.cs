@@ -12,7 +12,7 @@ using WaterMix.Workspace.Runs;
 namespace WaterMix.Web.Tests.Api;
 
 /// <summary>Studies, runs and columns of the study that a new data folder begins with.</summary>
-public sealed class StoredEndpointsTests(RunningApp app) : IClassFixture<RunningApp>
+public sealed class StoredEndpointsTests(RunningApp app)
 {
     [Fact]
     public async Task Studies_NewFolder_ListTheInventedCruise()

@@ -2,7 +2,7 @@ using System.Net;
 
 namespace WaterMix.Web.Tests.Hosting;
 
-public sealed class HostAndOriginTests(RunningApp app) : IClassFixture<RunningApp>
+public sealed class HostAndOriginTests(RunningApp app)
 {
     // Loopback: 127.0.0.0/8 and ::1 (RFC 6890), localhost and names under it (RFC 6761, section 6.3).
     [Theory]

@@ -2,7 +2,7 @@ using System.Text.RegularExpressions;
 
 namespace WaterMix.Web.Tests.Hosting;
 
-public sealed partial class SecurityHeadersTests(RunningApp app) : IClassFixture<RunningApp>
+public sealed partial class SecurityHeadersTests(RunningApp app)
 {
     [Theory]
     [InlineData("/", "localhost")]

@@ -12,7 +12,7 @@ public sealed class PlainTextTests
     public void Count_OfThings_AgreesInNumber(long count, string expected) => Assert.Equal(expected, PlainText.Count(count, "sample"));
 
     [Theory]
-    [InlineData(-1.255, 2, "\u22121.26")]
+    [InlineData(-1.256, 2, "\u22121.26")]
     [InlineData(12345.6, 1, "12\u00a0345.6")]
     [InlineData(double.NaN, 2, "\u2013")]
     public void Number_ForPeople_HasATrueMinusSign(double value, int decimals, string expected) => Assert.Equal(expected, PlainText.Number(value, decimals));
