@@ -9,9 +9,9 @@ namespace WaterMix.Web.State.Results;
 /// <param name="studies">The studies.</param>
 /// <param name="cruises">The samples.</param>
 /// <param name="runs">The runs.</param>
-public sealed class ResultsState(IStudies studies, ICruises cruises, IRuns runs) : IDisposable
+public sealed class ResultsState(IStudies studies, ICruises cruises, IRuns runs)
 {
-    private readonly SemaphoreSlim _one = new(1);
+    private Task _before = Task.CompletedTask;
     private ResultsMaker? _maker;
     private int _latest;
 
@@ -75,7 +75,11 @@ public sealed class ResultsState(IStudies studies, ICruises cruises, IRuns runs)
             return;
         }
 
-        await _one.WaitAsync();
+        // One after the other, in the order of the calls.
+        Task before = _before;
+        var done = new TaskCompletionSource();
+        _before = done.Task;
+        await before;
         try
         {
             if (own != _latest)
@@ -95,7 +99,7 @@ public sealed class ResultsState(IStudies studies, ICruises cruises, IRuns runs)
         }
         finally
         {
-            _one.Release();
+            done.SetResult();
         }
     }
 
@@ -118,9 +122,6 @@ public sealed class ResultsState(IStudies studies, ICruises cruises, IRuns runs)
         await runs.RenameAsync(Run.Id, name.Trim());
         return null;
     }
-
-    /// <inheritdoc/>
-    public void Dispose() => _one.Dispose();
 
     private Run? Chosen(ResultsView view) =>
         view.Run is { } named

@@ -12,7 +12,7 @@ public class ResultsStateTests
     public async Task ReadAsync_NewestRunIsAtWork_ShowsTheNewestFinishedOne()
     {
         var workspace = new OneStudy(Newer, Old);
-        using ResultsState state = Of(workspace);
+        ResultsState state = Of(workspace);
 
         await state.ReadAsync(OneStudy.Id, new ResultsView());
 
@@ -24,7 +24,7 @@ public class ResultsStateTests
     [Fact]
     public async Task ReadAsync_RunThatIsNotThere_ShowsNoneRatherThanAnother()
     {
-        using ResultsState state = Of(new OneStudy(Old));
+        ResultsState state = Of(new OneStudy(Old));
 
         await state.ReadAsync(OneStudy.Id, new ResultsView { Run = Guid.NewGuid() });
 
@@ -36,7 +36,7 @@ public class ResultsStateTests
     public async Task TakeProgressAsync_RunFinishes_ShowsItsResults()
     {
         var workspace = new OneStudy(Newer);
-        using ResultsState state = Of(workspace);
+        ResultsState state = Of(workspace);
         await state.ReadAsync(OneStudy.Id, new ResultsView());
         Assert.Null(state.Shown);
 
@@ -51,7 +51,7 @@ public class ResultsStateTests
     [Fact]
     public async Task TakeProgressAsync_RunOfAnotherStudy_ChangesNothing()
     {
-        using ResultsState state = Of(new OneStudy(Old));
+        ResultsState state = Of(new OneStudy(Old));
         await state.ReadAsync(OneStudy.Id, new ResultsView());
 
         Assert.False(await state.TakeProgressAsync(Guid.NewGuid(), new ResultsView()));
@@ -62,7 +62,7 @@ public class ResultsStateTests
     {
         var gate = new TaskCompletionSource();
         var workspace = new OneStudy(Old) { Gate = gate.Task };
-        using ResultsState state = Of(workspace);
+        ResultsState state = Of(workspace);
 
         Task first = state.ReadAsync(OneStudy.Id, new ResultsView());
         Task second = state.ShowAsync(new ResultsView { Sample = 1 });
@@ -77,7 +77,7 @@ public class ResultsStateTests
     [Fact]
     public async Task ShowAsync_ResultsCannotBeRead_SaysSoAndWhatToDo()
     {
-        using ResultsState state = Of(new OneStudy(Old) { Fault = new IOException("The file is gone.") });
+        ResultsState state = Of(new OneStudy(Old) { Fault = new IOException("The file is gone.") });
 
         await state.ReadAsync(OneStudy.Id, new ResultsView());
 
@@ -91,7 +91,7 @@ public class ResultsStateTests
     public async Task RenameAsync_Name_IsTakenUnlessEmpty(string name, string? problem)
     {
         var workspace = new OneStudy(Old);
-        using ResultsState state = Of(workspace);
+        ResultsState state = Of(workspace);
         await state.ReadAsync(OneStudy.Id, new ResultsView());
 
         Assert.Equal(problem, await state.RenameAsync(name));
