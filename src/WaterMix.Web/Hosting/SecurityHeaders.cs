@@ -6,7 +6,7 @@ public sealed class SecurityHeaders(RequestDelegate next)
 {
     /// <summary>
     /// Everything from this server, nothing inline, no eval. Style elements too come from files only; style attributes are allowed because
-    /// the component library sets widths and positions by them (an attribute cannot run script or load anything: images and fonts from
+    /// the component library sets widths and positions by them: a page with one grid of it needs 63 (an attribute cannot run script or load anything: images and fonts from
     /// elsewhere are refused all the same). <c>blob:</c> and <c>data:</c> images are figures made in the page, for saving.
     /// </summary>
     public const string ContentSecurityPolicy =
