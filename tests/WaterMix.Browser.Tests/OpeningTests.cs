@@ -51,9 +51,10 @@ public sealed class OpeningTests(RealBrowser browser)
         await Assertions.Expect(pressure).ToHaveAttributeAsync("aria-sort", "ascending");
 
         ILocator plot = page.GetByRole(AriaRole.Region, new() { Name = "Figure of the results" }).GetByRole(AriaRole.Application).First;
+        Assert.True(await ColouredPixels.WaitForAsync(plot, atLeast: 500), "The section has no coloured dots.");
         await plot.FocusAsync();
         await page.Keyboard.PressAsync("ArrowRight");
-        await page.Keyboard.PressAsync("ArrowRight");
+        await Assertions.Expect(plot).ToContainTextAsync("Station"); // what a screen reader says of the point
         await page.Keyboard.PressAsync("Enter");
         ILocator card = page.GetByRole(AriaRole.Article, new() { NameRegex = new("^Sample: Station") });
         await card.WaitForAsync();

@@ -11,11 +11,23 @@ internal static class FigureModule
     /// <param name="file">The module's file under <c>scripts/figures</c>.</param>
     /// <param name="host">The element.</param>
     /// <param name="self">What it calls back.</param>
-    public static async Task<IJSObjectReference> CreateAsync<T>(IJSRuntime js, string file, ElementReference host, DotNetObjectReference<T> self)
+    /// <returns>The drawing, or null where the figure has gone while its script was loading.</returns>
+    public static async Task<IJSObjectReference?> CreateAsync<T>(IJSRuntime js, string file, ElementReference host, DotNetObjectReference<T> self)
         where T : class
     {
-        await using IJSObjectReference module = await js.InvokeAsync<IJSObjectReference>("import", "./scripts/figures/" + file);
-        return await module.InvokeAsync<IJSObjectReference>("create", host, self);
+        IJSObjectReference? drawing = null;
+        try
+        {
+            await using IJSObjectReference module = await js.InvokeAsync<IJSObjectReference>("import", "./scripts/figures/" + file);
+            drawing = await module.InvokeAsync<IJSObjectReference>("create", host, self);
+            _ = self.Value; // Throws where the figure was disposed of meanwhile.
+            return drawing;
+        }
+        catch (Exception fault) when (fault is ObjectDisposedException or JSDisconnectedException or OperationCanceledException)
+        {
+            await DisposeAsync(drawing);
+            return null;
+        }
     }
 
     /// <summary>Ends a drawing; nothing happens where the page has already gone.</summary>
@@ -32,7 +44,7 @@ internal static class FigureModule
             await drawing.InvokeVoidAsync("dispose");
             await drawing.DisposeAsync();
         }
-        catch (JSDisconnectedException)
+        catch (Exception fault) when (fault is JSDisconnectedException or OperationCanceledException)
         {
             // The page was closed, and its drawing with it.
         }

@@ -95,10 +95,15 @@ public sealed partial class SectionFigure
             return;
         }
 
-        if (_panels is null)
+        if (_self is null)
         {
             _self = DotNetObjectReference.Create(this);
             _panels = await FigureModule.CreateAsync(JS, "panels.js", _root, _self);
+        }
+
+        if (_panels is null)
+        {
+            return;
         }
 
         if (_drawn is not { } drawn || !ReferenceEquals(drawn.Section, Section) || !drawn.Panels.SequenceEqual(Panels))

@@ -9,12 +9,13 @@ namespace WaterMix.Web.State.EndMembers;
 /// <param name="samples">The samples.</param>
 public sealed class EndMembersDesk(StudySamples samples)
 {
-    /// <summary>Above this number of samples the shares of all pairs wait until a moved source is let go.</summary>
-    private const int MostWhileMoving = 30_000;
+    /// <summary>Above this number of samples the shares of all pairs are counted beside the page's own work, and not while a source moves.</summary>
+    private const int MostAtOnce = 30_000;
 
     private MixingModel? _present;
     private MixingModel? _moving;
     private LayerCensus? _census;
+    private (FigureColumns Columns, IReadOnlyList<Layer> Layers)? _counted;
     private (FigureColumns Columns, string X, string Y, string Colour, string? Layer, IReadOnlyList<Layer> Layers)? _drawn;
     private bool[] _counts = [];
     private (string? X, string? Y, string? Layer, string? Colour) _asked;
@@ -48,6 +49,9 @@ public sealed class EndMembersDesk(StudySamples samples)
 
     /// <summary>What the sources cannot make, by pairs of tracers.</summary>
     public PlaneShares Shares { get; private set; } = new([], 0, double.NaN);
+
+    /// <summary>True where <see cref="Shares"/> are those of before, because there are many samples: <see cref="CountAsync"/> counts them anew.</summary>
+    public bool IsCounting { get; private set; }
 
     /// <summary>Number of samples that are looked at.</summary>
     public long Looked { get; private set; }
@@ -87,8 +91,31 @@ public sealed class EndMembersDesk(StudySamples samples)
 
         LayerId = model.LayersOrAll.Any(l => l.Id == layer) ? layer : null;
         Colour = colour ?? Quantity.Pressure.Id;
-        _census = LayerCensus.Of(model, Columns);
-        Draw(true);
+        if (_census is null || _counted is not { } counted || !ReferenceEquals(counted.Columns, columns) || !counted.Layers.SequenceEqual(model.LayersOrAll))
+        {
+            _census = LayerCensus.Of(model, columns);
+            _counted = (columns, model.LayersOrAll);
+        }
+
+        IsCounting = columns.RowCount > MostAtOnce;
+        Draw(!IsCounting);
+    }
+
+    /// <summary>Counts the shares where that is still to be done; what was looked at meanwhile is not overwritten.</summary>
+    public async Task CountAsync()
+    {
+        if (!IsCounting || _present is not { } model)
+        {
+            return;
+        }
+
+        IReadOnlyList<string>? permitted = Permitted(model);
+        (IReadOnlyList<double[]> values, bool[] counts) = (Values(model), _counts);
+        PlaneShares shares = await Task.Run(() => PlaneShares.Of(model, permitted, values, counts));
+        if (ReferenceEquals(model, _present) && ReferenceEquals(counts, _counts))
+        {
+            (Shares, IsCounting) = (shares, false);
+        }
     }
 
     /// <summary>Shows a source where it is being moved to.</summary>
@@ -96,7 +123,7 @@ public sealed class EndMembersDesk(StudySamples samples)
     public void Move(MarkMove move)
     {
         _moving = Moved(_present!, move);
-        Draw(Columns.RowCount <= MostWhileMoving);
+        Draw(Columns.RowCount <= MostAtOnce);
     }
 
     /// <summary>The model with a source moved, its values rounded to a thousandth of what the plot shows.</summary>
@@ -113,15 +140,21 @@ public sealed class EndMembersDesk(StudySamples samples)
         }
 
         PlaneExtent extent = PlaneExtent.Of(Points.X, Points.Y);
-        MixingModel moved = SetEdits.WithValue(model, index, X, Rounded(X, move.X, extent.X.Width));
-        return SetEdits.WithValue(moved, index, Y, Rounded(Y, move.Y, extent.Y.Width));
+        return Along(Along(model, index, X, move.X, extent.X.Width), index, Y, move.Y, extent.Y.Width);
     }
 
-    private static double Rounded(string quantity, double value, double width)
+    // What did not move along an axis keeps its value to the last digit.
+    private static MixingModel Along(MixingModel model, int index, string quantity, double value, double width)
     {
+        double before = model.EndMembers.EndMembers[index].Values.GetValueOrDefault(quantity, double.NaN);
+        if (Math.Abs(value - before) <= 1e-6 * width)
+        {
+            return model;
+        }
+
         int decimals = Math.Clamp(3 - (int)Math.Floor(Math.Log10(width)), 0, 9);
         Quantity of = Quantity.FindOrFurther(quantity);
-        return Math.Clamp(Math.Round(value, decimals), of.Lowest, of.Highest);
+        return SetEdits.WithValue(model, index, quantity, Math.Clamp(Math.Round(value, decimals), of.Lowest, of.Highest));
     }
 
     private string Chosen(string? wanted, string[] usual) =>
@@ -130,15 +163,19 @@ public sealed class EndMembersDesk(StudySamples samples)
     private void Draw(bool withShares)
     {
         MixingModel model = Shown;
-        IReadOnlyList<string>? permitted = model.LayersOrAll.FirstOrDefault(l => l.Id == LayerId)?.EndMembers;
+        IReadOnlyList<string>? permitted = Permitted(model);
         DrawPoints(model);
         Sources = PropertySource.Of(model.EndMembers, X, Y, model.Fit.Factors, permitted);
         Processes = ProcessDirection.Of(model.Processes, X, Y, model.Fit.Factors);
         if (withShares)
         {
-            Shares = PlaneShares.Of(model, permitted, Columns, _counts);
+            Shares = PlaneShares.Of(model, permitted, Values(model), _counts);
         }
     }
+
+    private IReadOnlyList<string>? Permitted(MixingModel model) => model.LayersOrAll.FirstOrDefault(l => l.Id == LayerId)?.EndMembers;
+
+    private IReadOnlyList<double[]> Values(MixingModel model) => [.. model.Tracers.Select(Columns.Values)];
 
     private void DrawPoints(MixingModel model)
     {

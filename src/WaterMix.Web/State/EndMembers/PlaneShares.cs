@@ -15,12 +15,12 @@ public sealed record PlaneShares(IReadOnlyList<PlaneShare> Planes, long Samples,
     /// </summary>
     /// <param name="model">The model: its tracers, set, processes.</param>
     /// <param name="permitted">Ids of the permitted end-members; null for all.</param>
-    /// <param name="columns">The samples.</param>
+    /// <param name="values">The samples' values, an array for each tracer of the model in its order; NaN is missing.</param>
     /// <param name="counts">True for each row that counts.</param>
-    public static PlaneShares Of(MixingModel model, IReadOnlyList<string>? permitted, FigureColumns columns, bool[] counts)
+    public static PlaneShares Of(MixingModel model, IReadOnlyList<string>? permitted, IReadOnlyList<double[]> values, bool[] counts)
     {
         ArgumentNullException.ThrowIfNull(model);
-        ArgumentNullException.ThrowIfNull(columns);
+        ArgumentNullException.ThrowIfNull(values);
         ArgumentNullException.ThrowIfNull(counts);
         bool[] present = new bool[counts.Length];
         bool[] outside = new bool[counts.Length];
@@ -29,7 +29,7 @@ public sealed record PlaneShares(IReadOnlyList<PlaneShare> Planes, long Samples,
         {
             for (int j = i + 1; j < model.Tracers.Count; j++)
             {
-                planes.Add(One(model, model.Tracers[j], model.Tracers[i], permitted, columns, counts, present, outside));
+                planes.Add(One(model, (model.Tracers[j], values[j]), (model.Tracers[i], values[i]), permitted, counts, present, outside));
             }
         }
 
@@ -41,10 +41,10 @@ public sealed record PlaneShares(IReadOnlyList<PlaneShare> Planes, long Samples,
     }
 
     private static PlaneShare One(
-        MixingModel model, string xId, string yId, IReadOnlyList<string>? permitted, FigureColumns columns, bool[] counts, bool[] present, bool[] outside)
+        MixingModel model, (string Id, double[] Values) along, (string Id, double[] Values) against, IReadOnlyList<string>? permitted, bool[] counts, bool[] present, bool[] outside)
     {
-        double[] x = columns.Values(xId);
-        double[] y = columns.Values(yId);
+        (string xId, double[] x) = along;
+        (string yId, double[] y) = against;
         IEnumerable<PlanePoint> sources = PropertySource.Of(model.EndMembers, xId, yId, model.Fit.Factors, permitted).Where(s => s.Permitted).Select(s => new PlanePoint(s.X, s.Y));
         var region = ReachableRegion.Of(sources, ProcessDirection.Of(model.Processes, xId, yId, model.Fit.Factors), PlaneExtent.Of(x, y));
         long samples = 0;

@@ -53,8 +53,8 @@ public sealed class LayerCensus
 
     private static LayerCount Count(MixingModel model, Layer layer, int index, int[] layerOf, double[][] tracers, ConditionTests tests)
     {
-        bool[] used = [.. model.Tracers.Select(t => IsUsed(model, layer, t))];
-        double[][] changes = [.. model.Processes.Select(p => model.Tracers.Select(t => model.Fit.Factors.ChangeOf(t, p.Ratios)).ToArray())];
+        int[] used = [.. Enumerable.Range(0, tracers.Length).Where(t => IsUsed(model, layer, model.Tracers[t]))];
+        int[][] changed = [.. model.Processes.Select(p => used.Where(t => model.Fit.Factors.ChangeOf(model.Tracers[t], p.Ratios) != 0).ToArray())];
         int permitted = model.EndMembers.EndMembers.Count(e => layer.EndMembers.Contains(e.Id));
         long samples = 0;
         long tooFew = 0;
@@ -66,19 +66,28 @@ public sealed class LayerCensus
             }
 
             samples++;
-            int usable = Enumerable.Range(0, tracers.Length).Count(t => used[t] && double.IsFinite(tracers[t][row]));
-            int acting = 0;
-            for (int p = 0; p < changes.Length; p++)
+            int unknowns = permitted - 1;
+            for (int p = 0; p < changed.Length; p++)
             {
-                bool changesSomething = Enumerable.Range(0, tracers.Length).Any(t => used[t] && changes[p][t] != 0 && double.IsFinite(tracers[t][row]));
-                acting += changesSomething && tests.Hold(model.Processes[p].Where, row) ? 1 : 0;
+                unknowns += Usable(tracers, changed[p], row) > 0 && tests.Hold(model.Processes[p].Where, row) ? 1 : 0;
             }
 
-            tooFew += usable < Math.Max(permitted - 1 + acting, 1) ? 1 : 0;
+            tooFew += Usable(tracers, used, row) < Math.Max(unknowns, 1) ? 1 : 0;
         }
 
-        Process[] effective = [.. model.Processes.Where((_, p) => changes[p].Where((c, t) => used[t] && c != 0).Any())];
-        return new LayerCount(layer.Id, samples, tooFew, used.Count(u => u), permitted, effective.Count(p => p.Where.Count == 0), effective.Count(p => p.Where.Count > 0));
+        Process[] effective = [.. model.Processes.Where((_, p) => changed[p].Length > 0)];
+        return new LayerCount(layer.Id, samples, tooFew, used.Length, permitted, effective.Count(p => p.Where.Count == 0), effective.Count(p => p.Where.Count > 0));
+    }
+
+    private static int Usable(double[][] tracers, int[] which, int row)
+    {
+        int count = 0;
+        foreach (int t in which)
+        {
+            count += double.IsFinite(tracers[t][row]) ? 1 : 0;
+        }
+
+        return count;
     }
 
     // Standardised rows leave a tracer out in which the end-members do not differ.

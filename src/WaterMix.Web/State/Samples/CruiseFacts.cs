@@ -39,16 +39,19 @@ public static class CruiseFacts
     // ISO 8601 texts of one form sort as times do; the day is their beginning.
     private static string? Days(StudySamples samples, int[] rows)
     {
+        IdentityColumn?[] times = [.. samples.Columns.Cruises.Select(c => c.Samples.Identity.FirstOrDefault(i => i.Id == "time"))];
         string? first = null;
         string? last = null;
+        string? before = null;
         foreach (int row in rows)
         {
             (int cruise, int own) = samples.Columns.Locate(row);
-            IdentityColumn? times = samples.Columns.Cruises[cruise].Samples.Identity.FirstOrDefault(c => c.Id == "time");
-            if (times?[own] is { Length: >= 10 } time)
+            string time = times[cruise]?[own] ?? "";
+            if (time.Length >= 10 && !ReferenceEquals(time, before)) // The samples of a cast share one text.
             {
                 first = first is null || string.CompareOrdinal(time, first) < 0 ? time : first;
                 last = last is null || string.CompareOrdinal(time, last) > 0 ? time : last;
+                before = time;
             }
         }
 

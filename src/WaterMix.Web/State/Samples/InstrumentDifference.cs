@@ -42,6 +42,8 @@ public sealed record InstrumentDifference(
         double[] differences = [.. pairs.Select(row => bottle[row] - ctd[row])];
         double[] down = [.. pairs.Select(row => pressure[row])];
         (double mean, double sd) = MeanAndSd(differences);
+        (double Low, double High) half = MiddleHalf(differences);
+        FigureRange? shown = Shown(differences, half);
         FigureAxis axis = samples.AxisOf(quantity);
         var layers = new List<FigureLayer>
         {
@@ -55,11 +57,11 @@ public sealed record InstrumentDifference(
 
         return new InstrumentDifference(
             quantity, pairs.Length, mean, sd,
-            new FigureAxis($"{axis.Title}, bottle less CTD", axis.Unit) { Range = Shown(differences) }, FigureAxis.For(Core.Quantities.Quantity.Pressure), layers,
-            InWords(axis, differences, down));
+            new FigureAxis($"{axis.Title}, bottle less CTD", axis.Unit) { Range = shown }, FigureAxis.For(Core.Quantities.Quantity.Pressure), layers,
+            InWords(axis, differences, down, half, shown));
     }
 
-    private static string InWords(FigureAxis axis, double[] differences, double[] down)
+    private static string InWords(FigureAxis axis, double[] differences, double[] down, (double Low, double High) half, FigureRange? shown)
     {
         if (differences.Length < 2)
         {
@@ -67,7 +69,7 @@ public sealed record InstrumentDifference(
         }
 
         (double mean, double sd) = MeanAndSd(differences);
-        (double low, double high) = MiddleHalf(differences);
+        (double low, double high) = half;
         int decimals = DecimalsOf(high > low ? high - low : sd);
         string words = $"In {PlainText.Count(differences.Length)} pairs {Signed(mean, decimals, axis.Unit)} on average; the standard deviation is {WithUnit(sd, decimals, axis.Unit)}; half of the differences lie between {FigureText.Fixed(low, decimals)} and {WithUnit(high, decimals, axis.Unit)}.";
         double[] deep = [.. differences.Where((_, i) => down[i] >= DeepDbar)];
@@ -78,29 +80,28 @@ public sealed record InstrumentDifference(
         }
 
         int far = differences.Count(d => Math.Abs(d - mean) > 3 * sd);
-        FigureRange shown = Shown(differences)!.Value;
-        int beyond = differences.Count(d => d < shown.From || d > shown.To);
+        int beyond = differences.Count(d => d < shown?.From || d > shown?.To);
         words += far == 0 ? "" : $" {PlainText.Count(far, "pair lies", "pairs lie")} more than three standard deviations from the mean: look at their flags.";
         return beyond == 0 ? words : $"{words} {PlainText.Count(beyond, "pair stands", "pairs stand")} outside the plot; Show all brings {(beyond == 1 ? "it" : "them")} in.";
     }
 
     // The middle half and five times its width on both sides: one stray pair must not hide the scatter of the others.
-    private static FigureRange? Shown(double[] differences)
+    private static FigureRange? Shown(double[] differences, (double Low, double High) half)
     {
         if (FigureRange.Of(differences) is not { } all)
         {
             return null;
         }
 
-        (double low, double high) = MiddleHalf(differences);
-        double margin = 5 * (high - low);
-        var near = new FigureRange(Math.Max(all.From, low - margin), Math.Min(all.To, high + margin));
+        double margin = 5 * (half.High - half.Low);
+        var near = new FigureRange(Math.Max(all.From, half.Low - margin), Math.Min(all.To, half.High + margin));
         return (near.Width > 0 ? near : all).WithMargin(0.05);
     }
 
     private static (double Low, double High) MiddleHalf(double[] values)
     {
-        double[] sorted = [.. values.Order()];
+        double[] sorted = [.. values];
+        Array.Sort(sorted);
         return sorted.Length == 0 ? (double.NaN, double.NaN) : (sorted[(sorted.Length - 1) / 4], sorted[3 * (sorted.Length - 1) / 4]);
     }
 

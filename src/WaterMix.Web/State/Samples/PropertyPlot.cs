@@ -47,6 +47,6 @@ public sealed record PropertyPlot(string XId, string YId, FigureAxis X, FigureAx
 
         FigureAxis axis = samples.AxisOf(colour);
         double[] values = samples.Columns.Values(colour);
-        return new SequentialColour(axis.Title, axis.Unit, [.. shown.Select(row => values[row])]);
+        return TracerColour.Of(axis, [.. shown.Select(row => values[row])]);
     }
 }

@@ -62,6 +62,6 @@ public sealed record SectionOfCasts(Guid Cruise, string Quantity, SectionColumns
         int missing = values.Count(double.IsNaN);
         string caption = $"{samples.Cruises[cruise].Name}: {PlainText.Count(values.Length, "sample")} at {PlainText.Count(place.Stations.Count, "station")}"
             + (missing > 0 ? $"; {PlainText.Count(missing, "hollow mark has", "hollow marks have")} no usable value of {axis.Title}." : ".");
-        return new SectionOfCasts(samples.Cruises[cruise].Id, quantity, place, [new SectionPanel(quantity, axis.Label, new SequentialColour(axis.Title, axis.Unit, values))], caption);
+        return new SectionOfCasts(samples.Cruises[cruise].Id, quantity, place, [new SectionPanel(quantity, axis.Label, TracerColour.Of(axis, values))], caption);
     }
 }

@@ -1,8 +1,7 @@
 using WaterMix.Core.Mixing;
-using WaterMix.Core.Quantities;
-using WaterMix.Core.Samples;
 using WaterMix.Web.State.EndMembers;
 using WaterMix.Web.State.Figures;
+using WaterMix.Web.State.Mixing;
 using WaterMix.Web.Tests.State.Mixing;
 
 namespace WaterMix.Web.Tests.State.EndMembers;
@@ -10,15 +9,13 @@ namespace WaterMix.Web.Tests.State.EndMembers;
 public class PlaneSharesTests
 {
     // Between A (2 degC, 34.9, 280) and B (12, 36.2, 200): halfway is (7, 35.55, 240).
-    private static readonly double[] Theta = [7, 7, 7, 30];
-    private static readonly double[] Salinity = [35.55, 35.55, 35.55, 35.55];
-    private static readonly double[] Oxygen = [240, 200, 280, 240];
+    private static readonly double[][] Values = [[7, 7, 7, 30], [35.55, 35.55, 35.55, 35.55], [240, 200, 280, 240]];
 
     [Fact]
     public void Of_SamplesOnAndOffTheMixingLine_CountsThoseOff()
     {
         MixingModel model = SmallModel.Make();
-        PlaneShares shares = PlaneShares.Of(model, null, Columns(), [true, true, true, true]);
+        PlaneShares shares = PlaneShares.Of(model, null, Values, [true, true, true, true]);
         Assert.Equal(3, shares.Planes.Count);
         Assert.Equal(0.25, shares.Planes.Single(p => p.X == "practical_salinity" && p.Y == "potential_temperature").Outside);
         Assert.Equal(0.75, shares.OutsideAny);
@@ -27,8 +24,8 @@ public class PlaneSharesTests
     [Fact]
     public void Of_WithRespiration_ReachesSamplesThatLostOxygen()
     {
-        MixingModel model = ModelEditsOf(SmallModel.Make());
-        PlaneShares shares = PlaneShares.Of(model, null, Columns(), [true, true, true, false]);
+        MixingModel model = WithRespiration(SmallModel.Make());
+        PlaneShares shares = PlaneShares.Of(model, null, Values, [true, true, true, false]);
         PlaneShare plane = shares.Planes.Single(p => p.X == "oxygen" && p.Y == "practical_salinity");
         Assert.Equal(2.0 / 3, plane.OutsideMixtures, 1e-12);
         Assert.Equal(1.0 / 3, plane.Outside, 1e-12);
@@ -36,11 +33,11 @@ public class PlaneSharesTests
 
     [Fact]
     public void Of_OnlyOneSourcePermitted_LeavesThePointOfThatSource() =>
-        Assert.Equal(1, PlaneShares.Of(SmallModel.Make(), ["A"], Columns(), [true, true, true, true]).OutsideAny);
+        Assert.Equal(1, PlaneShares.Of(SmallModel.Make(), ["A"], Values, [true, true, true, true]).OutsideAny);
 
     [Fact]
     public void Of_NoSampleCounts_HasNoShare() =>
-        Assert.True(double.IsNaN(PlaneShares.Of(SmallModel.Make(), null, Columns(), [false, false, false, false]).OutsideAny));
+        Assert.True(double.IsNaN(PlaneShares.Of(SmallModel.Make(), null, Values, [false, false, false, false]).OutsideAny));
 
     // A property of the invented ocean: with its processes its own sources reach nearly all samples below the mask.
     [Fact]
@@ -48,22 +45,13 @@ public class PlaneSharesTests
     {
         MixingModel model = InventedCruise.Model;
         FigureColumns columns = InventedCruise.Columns(model);
-        bool[] counts = Array.ConvertAll(WaterMix.Web.State.Mixing.LayerCensus.Of(model, columns).LayerOf, layer => layer >= 0);
-        PlaneShares shares = PlaneShares.Of(model, null, columns, counts);
+        bool[] counts = Array.ConvertAll(LayerCensus.Of(model, columns).LayerOf, layer => layer >= 0);
+        PlaneShares shares = PlaneShares.Of(model, null, [.. model.Tracers.Select(columns.Values)], counts);
         Assert.Equal(15, shares.Planes.Count);
         Assert.InRange(shares.OutsideAny, 0, 0.35);
         Assert.True(shares.Planes[0].Outside >= shares.Planes[^1].Outside);
     }
 
-    private static MixingModel ModelEditsOf(MixingModel model) =>
-        WaterMix.Web.State.Mixing.ModelEdits.AddProcess(model, WaterMix.Web.State.Mixing.ProcessPreset.All[0].For(model));
-
-    private static FigureColumns Columns()
-    {
-        var table = new SampleTable(
-            4,
-            [],
-            [new SampleColumn(Quantity.PotentialTemperature, Theta), new SampleColumn(Quantity.PracticalSalinity, Salinity), new SampleColumn(Quantity.Oxygen, Oxygen)]);
-        return new FigureColumns([new FigureCruise("Cruise", table, null)]);
-    }
+    private static MixingModel WithRespiration(MixingModel model) =>
+        ModelEdits.AddProcess(model, ProcessPreset.All[0].For(model));
 }

@@ -1,6 +1,5 @@
 using WaterMix.Core.EndMembers;
 using WaterMix.Core.Mixing;
-using WaterMix.Workspace.Cruises;
 using WaterMix.Workspace.Runs;
 using WaterMix.Workspace.Studies;
 
@@ -21,7 +20,7 @@ internal sealed class DraftStudies(MixingModel draft) : IStudies
         Runs = [new Run(Guid.NewGuid(), "Run 1", DateTimeOffset.UnixEpoch, RunState.Finished, 1, 1, model, "hash", new Dictionary<SolveStatus, long>(), null)],
     };
 
-    public void Keep(params Cruise[] cruises) => Stored = Stored with { Cruises = cruises };
+    public void Keep(Run run) => Stored = Stored with { Runs = [run] };
 
     public Task<long?> SaveDraftAsync(Guid id, MixingModel saved, long expectedRevision)
     {
