@@ -43,7 +43,7 @@ public sealed class ExampleEndpointsTests(RunningApp app)
         string[] paths = [.. description.GetProperty("paths").EnumerateObject().Select(p => p.Name)];
         Assert.Equal(
             [
-                "/api/examples/{format}", "/api/inspect", "/api/runs/{id}", "/api/runs/{id}/columns", "/api/runs/{id}/model.json", "/api/runs/{id}/results.csv",
+                "/api/examples/{format}", "/api/inspect", "/api/runs/{id}", "/api/runs/{id}/columns", "/api/runs/{id}/endmembers.json", "/api/runs/{id}/model.json", "/api/runs/{id}/results.csv",
                 "/api/samples/{hash}/columns", "/api/solve", "/api/studies", "/api/studies/{id}", "/api/studies/{id}/endmembers.json", "/api/studies/{id}/model.json",
             ],
             paths.Order(StringComparer.Ordinal));

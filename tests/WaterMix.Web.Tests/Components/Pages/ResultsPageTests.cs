@@ -118,7 +118,7 @@ public sealed class ResultsPageTests : BunitContext
         IRenderedComponent<ResultsPage> page = Open(new OneStudy(TwoLayers.Run()));
 
         page.WaitForElements("button").Single(b => b.TextContent.StartsWith("Rename", StringComparison.Ordinal)).Click();
-        page.Find(".name-form input").Input("Without opal");
+        page.WaitForElement(".name-form input").Input("Without opal");
         page.Find(".name-form").Submit();
 
         page.WaitForAssertion(() => Assert.Contains("“Without opal”, run of", page.Markup, StringComparison.Ordinal));
