@@ -1,5 +1,3 @@
-using WaterMix.Core.Mixing.Kernels;
-
 namespace WaterMix.Core.Mixing;
 
 /// <summary>The chi-square distribution.</summary>
@@ -87,7 +85,8 @@ public static class ChiSquare
         double start = whole ? 1 : 0.5;
         int factors = (int)(a - start);
         double product = whole ? x : Math.Sqrt(x / Math.PI);
-        double share = ExactExponential.Exp(-x / (factors + 1));
+        double exponent = -x / (factors + 1);
+        double share = exponent < -700 ? 0 : Elementary.Exp(exponent);
         product *= share;
         for (int k = 0; k < factors; k++)
         {

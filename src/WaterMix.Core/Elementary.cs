@@ -1,6 +1,6 @@
 using static WaterMix.Core.Seawater.Polynomial;
 
-namespace WaterMix.Core.Seawater;
+namespace WaterMix.Core;
 
 /// <summary>
 /// exp, ln and sin^2 from additions and multiplications only, so that the same input gives the same bits on every machine; those
