@@ -9,7 +9,7 @@ public sealed record WeightedRows(IReadOnlyDictionary<string, double> Weights) :
     /// <summary>What is done to a tracer row before it is weighed.</summary>
     public Standardisation Standardise { get; init; } = Standardisation.MeanAndSd;
 
-    /// <summary>True: mean and sd are taken over the layer's permitted end-members; false: over the whole set.</summary>
+    /// <summary>Whether mean and sd are taken over the layer's permitted end-members or over the whole set.</summary>
     public StandardiseOver Over { get; init; } = StandardiseOver.Layer;
 
     /// <summary>The divisor of the variance.</summary>

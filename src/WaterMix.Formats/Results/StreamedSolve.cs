@@ -44,7 +44,7 @@ public static class StreamedSolve
         long[] statuses = new long[Enum.GetValues<SolveStatus>().Length];
         long[] usable = new long[model.ParentIds.Count];
         var notes = new List<Finding>();
-        double violation = double.NaN;
+        double violation = options.WithProof ? 0 : double.NaN;
         long rows = 0;
         foreach (SampleBlock block in samples.ReadBlocks(options.Cancellation))
         {
@@ -53,7 +53,11 @@ public static class StreamedSolve
             csv.Write(block, solved.Result);
             Count(solved, statuses, usable);
             notes.AddFolded(solved.Notes);
-            violation = Math.Max(double.IsNaN(violation) ? 0 : violation, solved.Result.KktViolation?.Where(v => !double.IsNaN(v)).DefaultIfEmpty(0).Max() ?? double.NaN);
+            foreach (double ofSample in solved.Result.KktViolation ?? [])
+            {
+                violation = double.IsNaN(ofSample) ? violation : Math.Max(violation, ofSample);
+            }
+
             rows += block.Table.RowCount;
             progress?.Report(rows);
         }
